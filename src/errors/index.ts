@@ -1,0 +1,1 @@
+export { type Fault, InputError } from "./input-error.ts";
