@@ -1,0 +1,127 @@
+import { type Isolator, staticDeflection, staticStiffness } from "../isolator/index.ts";
+import { type Excitation, forceOf, type Machine, norm, sensesOf } from "../machine/index.ts";
+import type { Analysis, FootState, SteadyState } from "./analysis.ts";
+import { footLoads } from "./foot-loads.ts";
+import { dampingRatio, naturalFrequency, transmissibilityOf, type VerticalModel, verticalModel } from "./vertical.ts";
+import { worstOver } from "./worst.ts";
+
+/** Forces whose resultant is under this share of the sum of their moduli cancel. */
+const CANCELS = 1e-6;
+const LOAD_TOLERANCE = 1e-12;
+const MAX_ITERATIONS = 60;
+
+/**
+ * Everything an arrangement does under a machine, by the vertical model.
+ * @param machine    with as many feet as there are isolators
+ * @param isolators  one a foot
+ * @returns          the analysis; loads that are not positive are reported as they are, for a gate to judge
+ * @throws {InputError} a centre of gravity outside the feet
+ */
+export function analyse(machine: Machine, isolators: readonly Isolator[]): Analysis {
+  const loads = arrangementLoads(machine, isolators);
+  const feet = isolators.map((isolator, i): FootState => {
+    const load = loads[i] as number;
+    return {
+      foot: i + 1,
+      isolator,
+      load,
+      utilisation: load / isolator.load.max,
+      staticDeflection: load > 0 ? staticDeflection(isolator, load) : 0,
+    };
+  });
+  const deflections = feet.map((foot) => foot.staticDeflection);
+  const model = verticalModel(
+    machine.mass,
+    isolators.map((isolator, i) => ({ isolator, load: Math.max(loads[i] as number, 0) })),
+  );
+  const omega = naturalFrequency(model);
+  const damping = dampingRatio(model, omega);
+  return {
+    feet,
+    staticDeflection: deflections.reduce((s, d) => s + d, 0) / deflections.length,
+    levelness: isolators.every(isLevelled) ? 0 : Math.max(...deflections) - Math.min(...deflections),
+    modes: [{ omega, dampingRatio: damping, shape: "vertical", energy: [0, 0, 1, 0, 0, 0] }],
+    naturalFrequency: omega,
+    dampingRatio: damping,
+    ...worstSteadyStates(machine, model, omega),
+  };
+}
+
+/** Levelled air springs hold their height whatever they carry. */
+function isLevelled(isolator: Isolator): boolean {
+  return isolator.axial.kind === "air";
+}
+
+/**
+ * Static loads on the isolators as they are. A curve shares the load by its secant at that load, so the loads
+ * are found by iteration; levelled air springs share the weight as equal springs would.
+ */
+function arrangementLoads(machine: Machine, isolators: readonly Isolator[]): readonly number[] {
+  let loads = footLoads(machine);
+  if (machine.feet === null || isolators.every(isLevelled)) return loads;
+  for (let i = 0; i < MAX_ITERATIONS; i++) {
+    const secants = isolators.map((isolator, foot) => {
+      const load = loads[foot] as number;
+      return load > 0 ? load / staticDeflection(isolator, load) : staticStiffness(isolator, 0);
+    });
+    const next = footLoads(machine, secants);
+    const moved = next.some((load, foot) => Math.abs(load - (loads[foot] as number)) > LOAD_TOLERANCE * machine.mass);
+    loads = next;
+    if (!moved) break;
+  }
+  return loads;
+}
+
+/**
+ * Amplitude of the vertical force applied at an order, N, the larger over the senses of rotation.
+ * @returns `undefined` when nothing acts at the order, `null` when what acts there has no vertical part
+ */
+export function verticalForce(machine: Machine, order: number, speed: number): number | null | undefined {
+  const acting = machine.excitations.filter((e) => e.order === order);
+  if (acting.length === 0) return undefined;
+  return sensesOf(machine).reduce<number | null>((largest, sense) => {
+    const forces = acting.map((e: Excitation) => forceOf(e, machine, speed, sense));
+    const re = forces.reduce((s, f) => s + f[2].re, 0);
+    const im = forces.reduce((s, f) => s + f[2].im, 0);
+    const moduli = forces.reduce((s, f) => s + norm([modulus(f[0]), modulus(f[1]), modulus(f[2])]), 0);
+    const resultant = Math.hypot(re, im);
+    return resultant <= CANCELS * moduli ? largest : Math.max(largest ?? 0, resultant);
+  }, null);
+}
+
+function modulus(z: { readonly re: number; readonly im: number }): number {
+  return Math.hypot(z.re, z.im);
+}
+
+/** The largest transmissibility and the largest transmitted force over the speed range and every order. */
+function worstSteadyStates(
+  machine: Machine,
+  model: VerticalModel,
+  omega: number,
+): { readonly worst: SteadyState | null; readonly worstForce: SteadyState | null } {
+  const { min, max } = machine.speed;
+  let worst: SteadyState | null = null;
+  let worstForce: SteadyState | null = null;
+  for (const order of machine.orders) {
+    const applied = (speed: number): number | null | undefined => verticalForce(machine, order, speed);
+    if (applied(max) === null) continue;
+    const transmissibility = (speed: number): number =>
+      transmissibilityOf(model.mass, model.stiffnessAt(order * speed), order * speed);
+    const force = (speed: number): number => transmissibility(speed) * (applied(speed) ?? 0);
+    const entry = (speed: number): SteadyState => ({
+      speed,
+      order,
+      omega: order * speed,
+      transmissibility: transmissibility(speed),
+      transmittedForce: applied(speed) === undefined ? null : force(speed),
+    });
+
+    const resonance = [omega / order];
+    const candidate = entry(worstOver(transmissibility, min, max, resonance).at);
+    if (worst === null || (candidate.transmissibility ?? 0) > (worst.transmissibility ?? 0)) worst = candidate;
+    if (applied(max) === undefined) continue;
+    const byForce = entry(worstOver(force, min, max, resonance).at);
+    if (worstForce === null || (byForce.transmittedForce ?? 0) > (worstForce.transmittedForce ?? 0)) worstForce = byForce;
+  }
+  return { worst, worstForce };
+}

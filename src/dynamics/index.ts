@@ -1,0 +1,13 @@
+export { analyse, verticalForce } from "./analyse.ts";
+export type { Analysis, FootState, Mode, Shape, SteadyState } from "./analysis.ts";
+export { footLoads } from "./foot-loads.ts";
+export {
+  type ComplexStiffness,
+  dampingRatio,
+  type Mount,
+  naturalFrequency,
+  transmissibilityOf,
+  type VerticalModel,
+  verticalModel,
+} from "./vertical.ts";
+export { type Maximum, worstOver } from "./worst.ts";

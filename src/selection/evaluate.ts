@@ -1,0 +1,95 @@
+import { type Analysis, analyse, type FootState } from "../dynamics/index.ts";
+import type { Arrangement } from "./arrange.ts";
+import type { Check, Gate } from "./gates.ts";
+import { type SelectionRequest, transmissibilityLimit } from "./request.ts";
+
+/** A mode this close to an excitation line, relative to the line, is excited at resonance. */
+const RESONANCE_BAND = 0.2;
+
+/** An arrangement with what it does and how it was judged. */
+export interface Evaluated {
+  readonly arrangement: Arrangement;
+  readonly analysis: Analysis;
+  readonly checks: readonly Check[];
+  /** The tightest of limit over value among the targets; `null` when a target could not be judged. */
+  readonly margin: number | null;
+  /** Of all isolators together; `null` when one is unpriced or currencies differ. */
+  readonly price: number | null;
+  readonly currency: string | null;
+}
+
+/**
+ * Analyses an arrangement and judges it by every gate that depends on the load, in the order of the gates.
+ * @throws {InputError} a centre of gravity outside the feet
+ */
+export function evaluate(request: SelectionRequest, arrangement: Arrangement): Evaluated {
+  const analysis = analyse(request.machine, arrangement);
+  const targets = targetChecks(request, analysis);
+  const cost = priceOf(arrangement);
+  const { levelness, staticDeflection, price } = request.limits;
+  const checks: Check[] = [...loadChecks(analysis.feet)];
+  if (levelness !== null) checks.push(atMost("levelness", analysis.levelness, levelness));
+  if (staticDeflection !== null)
+    checks.push(atMost("static_deflection", analysis.staticDeflection, staticDeflection));
+  checks.push(...targets);
+  if (request.machine.speed.min === request.machine.speed.max) checks.push(resonanceCheck(request, analysis));
+  if (price !== null) checks.push(atMost("price", cost.price, price));
+  return { arrangement, analysis, checks, margin: marginOf(targets), ...cost };
+}
+
+/** A value that must not exceed a limit; one that is not known fails. */
+function atMost(gate: Gate, value: number | null, limit: number): Check {
+  return { gate, value, limit, passed: value !== null && value <= limit };
+}
+
+/** Whether each foot bears enough, not too much, and at all; each reports the foot that is worst off. */
+function loadChecks(feet: readonly FootState[]): readonly Check[] {
+  const worst = (measure: (foot: FootState) => number): FootState =>
+    feet.reduce((a, b) => (measure(b) > measure(a) ? b : a));
+  const light = worst((foot) => foot.isolator.load.min - foot.load);
+  const heavy = worst((foot) => foot.utilisation);
+  const least = worst((foot) => -foot.load);
+  const { min } = light.isolator.load;
+  const { max } = heavy.isolator.load;
+  return [
+    { gate: "underloaded", value: light.load, limit: min, passed: light.load >= min || light.load <= 0 },
+    { gate: "overloaded", value: heavy.load, limit: max, passed: heavy.load <= max },
+    { gate: "uplift", value: least.load, limit: 0, passed: least.load > 0 },
+  ];
+}
+
+function targetChecks({ target }: SelectionRequest, { worst, worstForce }: Analysis): readonly Check[] {
+  const checks: Check[] = [];
+  const limit = transmissibilityLimit(target);
+  if (limit !== null) checks.push(atMost("transmissibility", worst?.transmissibility ?? null, limit));
+  if (target.transmittedForce !== null)
+    checks.push(atMost("transmitted_force", worstForce?.transmittedForce ?? null, target.transmittedForce));
+  return checks;
+}
+
+function marginOf(targets: readonly Check[]): number | null {
+  const margins = targets.map(({ value, limit }) => (value === null || limit === null ? null : limit / value));
+  return margins.includes(null) ? null : Math.min(...(margins as number[]));
+}
+
+/** At a fixed speed no mode may lie close to an excitation line; reports the nearest, as mode over line. */
+function resonanceCheck({ machine }: SelectionRequest, { modes }: Analysis): Check {
+  const ratios = modes.flatMap((mode) => machine.orders.map((order) => mode.omega / (order * machine.speed.max)));
+  const nearest = ratios.reduce((a, b) => (Math.abs(b - 1) < Math.abs(a - 1) ? b : a));
+  return {
+    gate: "resonance",
+    value: nearest,
+    limit: nearest < 1 ? 1 - RESONANCE_BAND : 1 + RESONANCE_BAND,
+    passed: Math.abs(nearest - 1) >= RESONANCE_BAND,
+  };
+}
+
+function priceOf(arrangement: Arrangement): { readonly price: number | null; readonly currency: string | null } {
+  const currency = arrangement[0]?.currency ?? null;
+  let price = 0;
+  for (const isolator of arrangement) {
+    if (isolator.price === null || isolator.currency !== currency) return { price: null, currency: null };
+    price += isolator.price;
+  }
+  return { price, currency };
+}
