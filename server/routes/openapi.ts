@@ -1,0 +1,32 @@
+import { readFileSync } from "node:fs";
+import { join } from "node:path";
+import { packageRoot } from "../package-info.ts";
+import { type Route, route } from "../route.ts";
+
+let document: string | undefined;
+
+export const openapiRoutes: readonly Route[] = [
+  route({
+    method: "get",
+    path: "/openapi.json",
+    access: "open",
+    operation: {
+      operationId: "getOpenapi",
+      summary: "This document",
+      description: "The contract of the service as an OpenAPI 3.1 document.",
+      tags: ["service"],
+      responses: {
+        200: {
+          description: "The document.",
+          content: {
+            "application/json": { schema: { type: "object", required: ["openapi", "info", "paths"] } },
+          },
+        },
+      },
+    },
+    handler({ response }) {
+      document ??= readFileSync(join(packageRoot, "openapi", "openapi.json"), "utf8");
+      response.type("application/json").send(document);
+    },
+  }),
+];
