@@ -1,9 +1,9 @@
 import { readFileSync } from "node:fs";
 import { join } from "node:path";
-import { createDocument, type ZodOpenApiOperationObject, type ZodOpenApiResponseObject } from "zod-openapi";
+import { createDocument, type ZodOpenApiContentObject, type ZodOpenApiOperationObject, type ZodOpenApiResponseObject } from "zod-openapi";
 import { engineVersion, packageRoot } from "../server/package-info.ts";
 import { PROBLEMS } from "../server/problems.ts";
-import { problemsOf, type Route, TAGS } from "../server/route.ts";
+import { type Content, problemsOf, type Route, TAGS } from "../server/route.ts";
 import { ProblemSchema } from "./problem-schema.ts";
 
 /** The path of a route as OpenAPI writes it: `/v1/isolators/:id` is `/v1/isolators/{id}`. */
@@ -86,7 +86,7 @@ function securityOf({ access, keyInQuery }: Route): Record<string, string[]>[] {
 function responsesOf(route: Route): Record<string, ZodOpenApiResponseObject> {
   const responses: Record<string, ZodOpenApiResponseObject> = {};
   for (const [status, { description, content }] of Object.entries(route.operation.responses)) {
-    responses[status] = { description, ...(content && { content: { ...content } }) };
+    responses[status] = { description, ...(content && { content: contentOf(content) }) };
   }
   const codes = [...problemsOf(route)];
   for (const status of new Set(codes.map((code) => PROBLEMS[code].status))) {
@@ -99,6 +99,10 @@ function responsesOf(route: Route): Record<string, ZodOpenApiResponseObject> {
     };
   }
   return responses;
+}
+
+function contentOf(content: Readonly<Record<string, Content>>): ZodOpenApiContentObject {
+  return Object.fromEntries(Object.entries(content).map(([type, { ...media }]) => [type, media]));
 }
 
 /** The record's own JSON Schema, which imports are checked by, as a component of the document. */

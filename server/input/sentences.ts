@@ -34,6 +34,7 @@ export function mustBe(expected: readonly string[], input: unknown): string {
 }
 
 function amount(origin: string, comparison: string, limit: number | bigint): string {
+  if (limit === 1 && comparison === "at least" && origin !== "number") return "not be empty";
   if (origin === "string") return `have ${comparison} ${limit} characters`;
   if (origin === "array" || origin === "set") return `have ${comparison} ${limit} entries`;
   return `be ${comparison} ${limit}`;

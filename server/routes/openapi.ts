@@ -1,7 +1,14 @@
 import { readFileSync } from "node:fs";
 import { join } from "node:path";
+import { z } from "zod";
 import { packageRoot } from "../package-info.ts";
 import { type Route, route } from "../route.ts";
+
+const OpenapiSchema = z.looseObject({
+  openapi: z.string(),
+  info: z.looseObject({}),
+  paths: z.looseObject({}),
+});
 
 let document: string | undefined;
 
@@ -18,9 +25,7 @@ export const openapiRoutes: readonly Route[] = [
       responses: {
         200: {
           description: "The document.",
-          content: {
-            "application/json": { schema: { type: "object", required: ["openapi", "info", "paths"] } },
-          },
+          content: { "application/json": { schema: OpenapiSchema } },
         },
       },
     },
