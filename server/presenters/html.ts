@@ -31,6 +31,6 @@ export const PLAIN_STYLE = `<style>
 body { max-width: 60rem; margin: 2rem auto; padding: 0 1rem; }
 table { border-collapse: collapse; }
 th, td { text-align: left; vertical-align: top; padding: 0.4rem 0.8rem 0.4rem 0; border-bottom: 1px solid; }
-code { overflow-wrap: anywhere; }
+th code { white-space: nowrap; }
 </style>
 `;
