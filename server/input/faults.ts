@@ -3,7 +3,7 @@ import type { Fault } from "../../src/errors/index.ts";
 import { knownKeys } from "./known-keys.ts";
 import { suggestion } from "./nearest.ts";
 import { jsonPointer } from "./pointer.ts";
-import { mustBe } from "./sentences.ts";
+import { mustBe, NO_FORM } from "./sentences.ts";
 
 /**
  * The faults in a zod error, each with the most specific place that can be named: an unknown field is pointed
@@ -53,11 +53,10 @@ function union(issue: z.core.$ZodIssueInvalidUnion, path: readonly PropertyKey[]
   const [nearestForm] = entered.toSorted((a, b) => strangeness(a) - strangeness(b) || a.length - b.length);
   if (nearestForm !== undefined) return flatten(nearestForm, path, input);
 
-  const value = valueAt(input, path);
   const expected = issue.errors.flatMap(expectedKinds);
-  return [
-    { path, detail: value === undefined || expected.length === 0 ? issue.message : mustBe(expected, value) },
-  ];
+  const detail =
+    issue.message === NO_FORM && expected.length > 0 ? mustBe(expected, valueAt(input, path)) : issue.message;
+  return [{ path, detail }];
 }
 
 /** The form does not even have the right kind of value: an object where a number is due. */

@@ -1,6 +1,9 @@
 import type { z } from "zod";
 import { suggestion } from "./nearest.ts";
 
+/** Of a field with several forms, when the schema has no wording of its own. */
+export const NO_FORM = "has none of the forms that are known here";
+
 /**
  * What is wrong with a field, in words that follow its name: "is missing", "must be at most 5". Wording that a
  * schema brings itself is kept; this is only for what zod would say in its own words.
@@ -20,7 +23,7 @@ export const sentence: z.core.$ZodErrorMap = (issue) => {
       // Only a discriminated union names its options, and with them the field that tells its forms apart.
       return Array.isArray(issue["options"])
         ? oneOf(issue["options"].map(String), fieldOf(issue.input, issue["discriminator"]))
-        : "has none of the forms that are known here";
+        : NO_FORM;
     case "invalid_format":
       return issue.format === "regex" ? "is not of the form asked for" : `is not a valid ${issue.format}`;
     default:

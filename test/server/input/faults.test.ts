@@ -39,6 +39,16 @@ describe("faults of a body", () => {
     expect(faults(null)).toEqual([{ pointer: "", detail: "must be an object, not null" }]);
   });
 
+  test("wording that a schema brings itself is kept", () => {
+    const own = z.strictObject({
+      mass: z.union([z.number(), z.string()], { error: "must be a mass, such as 850 kg" }),
+    });
+    const { error } = own.safeParse({ mass: true }, { error: sentence });
+    expect(error && faultsOf(error, own, { mass: true })).toEqual([
+      { pointer: "/mass", detail: "must be a mass, such as 850 kg" },
+    ]);
+  });
+
   test("a misspelt field is pointed at itself, with the nearest known name", () => {
     expect(faults({ mass: 1, speed: 1, mountign: "floor" })).toEqual([
       { pointer: "/mountign", detail: 'is not a known field; did you mean "mounting"?' },
