@@ -3,7 +3,7 @@ import type { Fault } from "../../src/errors/index.ts";
 import { knownKeys } from "./known-keys.ts";
 import { suggestion } from "./nearest.ts";
 import { jsonPointer } from "./pointer.ts";
-import { mustBe, NO_FORM } from "./sentences.ts";
+import { mustBe, NO_FORM, oneOf } from "./sentences.ts";
 
 /**
  * The faults in a zod error, each with the most specific place that can be named: an unknown field is pointed
@@ -50,13 +50,28 @@ function flatten(
 
 function union(issue: z.core.$ZodIssueInvalidUnion, path: readonly PropertyKey[], input: unknown): Finding[] {
   const entered = issue.errors.filter((issues) => !issues.some(isRefusedWhole));
-  const [nearestForm] = entered.toSorted((a, b) => strangeness(a) - strangeness(b) || a.length - b.length);
+  const ofItsKind = entered.filter((issues) => !issues.some(isWrongKind));
+  const [nearestForm] = ofItsKind.toSorted((a, b) => strangeness(a) - strangeness(b) || a.length - b.length);
   if (nearestForm !== undefined) return flatten(nearestForm, path, input);
+
+  const [kind, ...kinds] = entered.flatMap((issues) => issues.filter(isWrongKind));
+  if (kind !== undefined) {
+    const at = [...path, ...kind.path];
+    const known = [kind, ...kinds]
+      .filter(({ path: [key] }) => key === kind.path[0])
+      .flatMap(({ values }) => values);
+    return [{ path: at, detail: oneOf(known.map(String), valueAt(input, at)) }];
+  }
 
   const expected = issue.errors.flatMap(expectedKinds);
   const detail =
     issue.message === NO_FORM && expected.length > 0 ? mustBe(expected, valueAt(input, path)) : issue.message;
   return [{ path, detail }];
+}
+
+/** The field that tells the forms apart by a constant, such as `kind`, names another form. */
+function isWrongKind(issue: z.core.$ZodIssue): issue is z.core.$ZodIssueInvalidValue {
+  return issue.code === "invalid_value" && issue.values.length === 1 && issue.path.length === 1;
 }
 
 /** The form does not even have the right kind of value: an object where a number is due. */

@@ -43,11 +43,13 @@ function amount(origin: string, comparison: string, limit: number | bigint): str
   return `be ${comparison} ${limit}`;
 }
 
-function oneOf(values: readonly string[], input: unknown): string {
-  const list = values.map((value) => `"${value}"`).join(", ");
-  const must = values.length === 1 ? `must be ${list}` : `must be one of ${list}`;
+/** `must be one of "floor", "suspended"`, with the nearest when it was misspelt. */
+export function oneOf(values: readonly string[], input: unknown): string {
+  const distinct = [...new Set(values)];
+  const list = distinct.map((value) => `"${value}"`).join(", ");
+  const must = distinct.length === 1 ? `must be ${list}` : `must be one of ${list}`;
   if (input === undefined) return `is missing and ${must}`;
-  return typeof input === "string" ? must + suggestion(input, values) : must;
+  return typeof input === "string" ? must + suggestion(input, distinct) : must;
 }
 
 function fieldOf(input: unknown, key: unknown): unknown {

@@ -83,6 +83,29 @@ describe("faults of a body", () => {
     ]);
   });
 
+  describe("where forms of several kinds, two of them alike, are no discriminated union", () => {
+    const forms = z.union([
+      z.strictObject({ kind: z.literal("force"), amplitude: z.number() }),
+      z.strictObject({ kind: z.literal("unbalance"), moment: z.number() }),
+      z.strictObject({ kind: z.literal("unbalance"), rotor_mass: z.number(), grade: z.string() }),
+    ]);
+    test.each([
+      [
+        { kind: "unbalanse", moment: 1 },
+        "/kind",
+        'must be one of "force", "unbalance"; did you mean "unbalance"?',
+      ],
+      [{}, "/kind", 'is missing and must be one of "force", "unbalance"'],
+      [{ kind: "force", grade: "G6.3" }, "/amplitude", "is missing"],
+      [{ kind: "unbalance", moment: "x" }, "/moment", "must be a number, not a string"],
+      [{ kind: "unbalance", rotor_mass: 1 }, "/grade", "is missing"],
+      [{ kind: "unbalance", momment: 1 }, "/moment", "is missing"],
+    ])("%j is explained by the form of its kind", (input, pointer, detail) => {
+      const { error } = forms.safeParse(input, { error: sentence });
+      expect(error && faultsOf(error, forms, input)[0]).toEqual({ pointer, detail });
+    });
+  });
+
   test("inside a chosen kind, a number out of range and a misspelt name are both told", () => {
     expect(faults({ mass: 1, speed: 1, excitation: [{ kind: "force", amplitude: 7, ampitude: 1 }] })).toEqual(
       [
