@@ -29,12 +29,12 @@ export function dimensionNamed(text: string): Dimension | undefined {
   return [...SPELLINGS.keys()].find((dimension) => unitNamed(text, dimension) !== undefined);
 }
 
-/** The symbol or alias of a dimension that is one slip of the pen from a text, if any. */
+/** The spelling that a text most likely meant: another case of it, or one slip of the pen away; or none. */
 export function nearestSpelling(text: string, dimension: Dimension): string | undefined {
   const name = plain(text).toLowerCase();
-  return Object.entries(unitsOf(dimension))
-    .flatMap(([symbol, { aliases }]) => [symbol, ...aliases])
-    .find((spelling) => oneSlip(name, plain(spelling).toLowerCase()));
+  const { folded } = SPELLINGS.get(dimension) as Spellings;
+  const near = folded.has(name) ? name : [...folded.keys()].find((spelling) => oneSlip(name, spelling));
+  return near === undefined ? undefined : folded.get(near)?.[0];
 }
 
 function spellingsOf(dimension: Dimension): Spellings {
