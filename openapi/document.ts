@@ -1,6 +1,12 @@
 import { readFileSync } from "node:fs";
 import { join } from "node:path";
-import { createDocument, type ZodOpenApiContentObject, type ZodOpenApiOperationObject, type ZodOpenApiResponseObject } from "zod-openapi";
+import {
+  createDocument,
+  type ZodOpenApiContentObject,
+  type ZodOpenApiObject,
+  type ZodOpenApiOperationObject,
+  type ZodOpenApiResponseObject,
+} from "zod-openapi";
 import { engineVersion, packageRoot } from "../server/package-info.ts";
 import { PROBLEMS } from "../server/problems.ts";
 import { type Content, problemsOf, type Route, TAGS } from "../server/route.ts";
@@ -13,7 +19,21 @@ export function documentPath(expressPath: string): string {
 
 /** The OpenAPI 3.1 document of the given routes. */
 export function buildDocument(routes: readonly Route[]) {
-  return createDocument({
+  return createDocument(describe(routes), { override: asAnswer });
+}
+
+/**
+ * What an answer shares with a request is told otherwise of the answer: it is open, since a later member must
+ * break no reader, and the examples of what may be sent (text with units) are not what comes back.
+ */
+function asAnswer({ jsonSchema, io }: { jsonSchema: Record<string, unknown>; io: "input" | "output" }): void {
+  if (io === "input") return;
+  delete jsonSchema["examples"];
+  if (jsonSchema["additionalProperties"] === false) delete jsonSchema["additionalProperties"];
+}
+
+function describe(routes: readonly Route[]): ZodOpenApiObject {
+  return {
     openapi: "3.1.1",
     info: {
       title: "mountrank",
@@ -44,7 +64,7 @@ export function buildDocument(routes: readonly Route[]) {
         },
       },
     },
-  });
+  };
 }
 
 function pathsOf(routes: readonly Route[]): Record<string, Record<string, ZodOpenApiOperationObject>> {

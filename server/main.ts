@@ -23,12 +23,17 @@ async function start(config: Config): Promise<void> {
 
 class ListenError extends Error {}
 
+const LISTEN_FAILURES: Readonly<Record<string, string>> = {
+  EADDRINUSE: "another program has this port; set PORT to a free one",
+  EADDRNOTAVAIL: "this machine has no such address; set HOST to one it has",
+  EACCES: "this port is for administrators; set PORT to one above 1023",
+};
+
 function listen(server: Server, { host, port }: Config): Promise<void> {
   return new Promise((resolve, reject) => {
     server.once("listening", resolve);
     server.once("error", (error: NodeJS.ErrnoException) => {
-      const why =
-        error.code === "EADDRINUSE" ? "another program has this port; set PORT to a free one" : error.message;
+      const why = LISTEN_FAILURES[error.code ?? ""] ?? error.message;
       reject(new ListenError(`cannot listen on ${host}:${port}: ${why}`));
     });
     server.listen(port, host);

@@ -40,6 +40,8 @@ export function quantity(dimension: Dimension, wanted: Wanted = {}) {
         context.issues.push({ code: "custom", message: fault ?? "", input: given });
         return z.NEVER;
       })
+      // Says what comes out, so that the answer, which repeats the request, can be documented.
+      .pipe(z.number())
   );
 }
 
