@@ -11,6 +11,8 @@ export interface IsolatorColumns {
   readonly maxLoad: Float64Array;
   /** Minimum static load, N. */
   readonly minLoad: Float64Array;
+  /** Smallest minimum load of this row and all after it, N, ascending: where the load gate can end. */
+  readonly minLoadFrom: Float64Array;
   /** Dynamic axial stiffness that does not depend on load, N/m; 0 for an air spring. */
   readonly stiffness: Float64Array;
   /** Dynamic axial stiffness per newton of static load, 1/m: ωₙ²/g for an air spring, else 0. */

@@ -45,8 +45,22 @@ export function screen(columns: IsolatorColumns, { loads, mass, lines }: ScreenT
       kept += loads.some((load) => load >= (minLoad[row] as number) && load <= (maxLoad[row] as number)) ? 1 : 0;
     }
   }
-  for (const line of lines) kept = keepUnder(columns, rows, kept, lightest, mass, line);
+  for (const line of binding(lines)) kept = keepUnder(columns, rows, kept, lightest, mass, line);
   return rows.subarray(0, kept);
+}
+
+/**
+ * The lines that can decide, the most demanding first so that the others see few rows. Beyond √2 times its
+ * natural frequency an isolator transmits the less the higher the frequency; so what holds a line under 1 holds
+ * every higher one that allows as much.
+ */
+function binding(lines: readonly ScreenLine[]): readonly ScreenLine[] {
+  /** Square of the natural frequency that an undamped isolator may have. */
+  const allowed = ({ omega, limit }: ScreenLine): number => (omega * omega * limit) / (1 + limit);
+  const implies = (a: ScreenLine, b: ScreenLine): boolean => a.limit <= 1 && a.omega <= b.omega && a.limit <= b.limit;
+  const decides = (line: ScreenLine, i: number): boolean =>
+    !lines.some((other, j) => implies(other, line) && (j < i || !implies(line, other)));
+  return lines.filter(decides).sort((a, b) => allowed(a) - allowed(b));
 }
 
 /**

@@ -1,0 +1,109 @@
+import type { FootState, Mode } from "../../src/dynamics/index.ts";
+import type { NearMiss, Option, SelectionRequest } from "../../src/selection/index.ts";
+import { inUnit } from "../../src/units/index.ts";
+import { finite } from "./number.ts";
+
+/** One option as JSON: plain numbers, each key ending in its unit. */
+export function presentOption(option: Option, request: SelectionRequest) {
+  const { analysis, arrangement } = option;
+  const { worst, worstForce } = analysis;
+  const { machine } = request;
+  const families = [...new Set(arrangement.map((isolator) => isolator.family))];
+  const transmissibility = finite(worst?.transmissibility);
+  const transmittedForce = finite(worstForce?.transmittedForce);
+  const lowest = machine.speed.min * (machine.orders[0] as number);
+  return {
+    rank: option.rank,
+    designation: itemsOf(option)
+      .map((item) => item.isolator)
+      .join(" + "),
+    series: arrangement[0]?.series ?? null,
+    family: families.join(" + "),
+    quantity: arrangement.length,
+    items: itemsOf(option),
+    feet: analysis.feet.map(presentFoot),
+    static_deflection_mm: inUnit(analysis.staticDeflection, "mm"),
+    levelness_mm: inUnit(analysis.levelness, "mm"),
+    natural_frequency_hz: inUnit(analysis.naturalFrequency, "Hz"),
+    frequency_ratio: lowest / analysis.naturalFrequency,
+    damping_ratio: analysis.dampingRatio,
+    transmissibility,
+    isolation_efficiency_percent: transmissibility === null ? null : 100 * (1 - transmissibility),
+    transmitted_force_n: transmittedForce,
+    worst_speed_rpm: worst === null ? null : inUnit(worst.speed, "rpm"),
+    margin: finite(option.margin),
+    modes: analysis.modes.map(presentMode),
+    price: option.price,
+    currency: option.currency,
+    unbeaten: option.unbeaten,
+    notes: notesOf(option, request),
+  };
+}
+
+export type PresentedOption = ReturnType<typeof presentOption>;
+
+/** What is to be ordered: each isolator of the arrangement with its number, in the order of the feet. */
+function itemsOf({ arrangement }: Option) {
+  return [...new Set(arrangement)].map((isolator) => ({
+    isolator: isolator.designation,
+    quantity: arrangement.filter((other) => other === isolator).length,
+    unit_price: isolator.price,
+  }));
+}
+
+function presentFoot({ foot, isolator, load, utilisation, staticDeflection }: FootState) {
+  return {
+    foot,
+    isolator: isolator.designation,
+    load_n: load,
+    utilisation,
+    static_deflection_mm: inUnit(staticDeflection, "mm"),
+  };
+}
+
+function presentMode({ omega, dampingRatio, shape, energy }: Mode) {
+  return { frequency_hz: inUnit(omega, "Hz"), damping_ratio: dampingRatio, shape, energy };
+}
+
+/** What the numbers of one option do not say, the reason of every null among them. */
+function notesOf({ analysis, arrangement, price }: Option, { machine, environment }: SelectionRequest): string[] {
+  const notes: string[] = [];
+  if (analysis.worst === null) notes.push("transmissibility: nothing acts vertically, and the vertical model knows no other direction.");
+  else if (finite(analysis.worst.transmissibility) === null)
+    notes.push("transmissibility: an undamped natural frequency is met exactly; no bound can be given.");
+  if (machine.excitations.length === 0) notes.push("transmitted_force_n: no excitation is stated.");
+  if (price === null) notes.push("price: not every isolator is priced in one currency.");
+  if (environment.temperature !== null && arrangement.some((isolator) => isolator.temperature === null))
+    notes.push("The record is silent on temperature: ask the supplier.");
+  if (arrangement.some(({ axial }) => axial.kind === "air"))
+    notes.push("Air springs: taken as levelled; they need air supply and levelling valves.");
+  const { min, max } = machine.speed;
+  if (min < max)
+    for (const mode of analysis.modes)
+      for (const order of machine.orders)
+        if (mode.omega >= order * min && mode.omega <= order * max)
+          notes.push(
+            `The ${mode.shape.replace("_", " ")} mode at ${inUnit(mode.omega, "Hz").toFixed(2)} Hz lies inside the speed range (order ${order}).`,
+          );
+  return notes;
+}
+
+/** The unit in which each gate's numbers are shown; a gate without one compares plain numbers. */
+const GATE_UNITS = {
+  free_height: "mm",
+  underloaded: "N",
+  overloaded: "N",
+  uplift: "N",
+  levelness: "mm",
+  static_deflection: "mm",
+  transmitted_force: "N",
+} as const;
+
+const PLAIN_UNITS: Readonly<Record<string, string>> = { lead_time: "days", resonance: "mode over excitation frequency" };
+
+/** A near miss as JSON, its numbers in the unit it names. */
+export function presentNearMiss({ designation, gate, value, limit }: NearMiss) {
+  const unit = gate in GATE_UNITS ? GATE_UNITS[gate as keyof typeof GATE_UNITS] : null;
+  const shown = (si: number): number => (unit === null ? si : inUnit(si, unit));
+  return { designation, gate, value: shown(value), limit: shown(limit), unit: unit ?? PLAIN_UNITS[gate] ?? null };
+}

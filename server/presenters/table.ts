@@ -1,0 +1,36 @@
+import { inUnit, ofUnit, type UnitSymbol, unitSuffix } from "../../src/units/index.ts";
+import { type Cell, type CsvStyle, csvOf } from "./csv.ts";
+
+/** Units for people, in CSV, sheets, plots and pages; JSON keeps its own. */
+export type UnitSystem = "si" | "us";
+
+/** A column of a table of `Row`s. */
+export interface Column<Row> {
+  /** Without its unit, which the header adds. */
+  readonly name: string;
+  readonly of: (row: Row) => Cell | undefined;
+  /** The unit of the value as JSON has it, which SI tables keep, and the one of US tables. */
+  readonly unit?: readonly [si: UnitSymbol, us: UnitSymbol];
+}
+
+/** Rows as CSV, in the units of a system, each header ending in the unit of its column. */
+export function tableCsv<Row>(
+  columns: readonly Column<Row>[],
+  rows: readonly Row[],
+  units: UnitSystem,
+  style: CsvStyle,
+): string {
+  const shown = columns.map(({ name, of, unit }) => {
+    if (unit === undefined) return { header: name, of: (row: Row): Cell => of(row) ?? null };
+    const [from, us] = unit;
+    const to = units === "us" ? us : from;
+    const convert = (value: Cell): Cell =>
+      typeof value === "number" && to !== from ? inUnit(ofUnit(value, from), to) : value;
+    return { header: `${name}_${unitSuffix(to)}`, of: (row: Row): Cell => convert(of(row) ?? null) };
+  });
+  return csvOf(
+    shown.map((column) => column.header),
+    rows.map((row) => shown.map((column) => column.of(row))),
+    style,
+  );
+}
