@@ -38,8 +38,18 @@ function compare(a: number | string | null, b: number | string | null, descendin
 
 function filtersOf(query: IsolatorQuery): readonly ((isolator: Isolator) => boolean)[] {
   const filters: ((isolator: Isolator) => boolean)[] = [];
-  const { families, series, load, natural_frequency_max, temp_min, temp_max, exposures, captive, max_height, max_price } =
-    query;
+  const {
+    families,
+    series,
+    load,
+    natural_frequency_max,
+    temp_min,
+    temp_max,
+    exposures,
+    captive,
+    max_height,
+    max_price,
+  } = query;
   if (families !== undefined) filters.push(({ family }) => families.includes(family));
   if (series !== undefined) filters.push((isolator) => isolator.series === series);
   if (load !== undefined) filters.push((isolator) => load >= isolator.load.min && load <= isolator.load.max);
@@ -53,9 +63,11 @@ function filtersOf(query: IsolatorQuery): readonly ((isolator: Isolator) => bool
     const highest = toSI(temp_max, "temperature");
     filters.push(({ temperature }) => temperature !== null && temperature.max >= highest);
   }
-  if (exposures !== undefined) filters.push(({ resists }) => exposures.every((exposure) => resists.includes(exposure)));
+  if (exposures !== undefined)
+    filters.push(({ resists }) => exposures.every((exposure) => resists.includes(exposure)));
   if (captive !== undefined) filters.push((isolator) => isolator.captive === (captive === "true"));
-  if (max_height !== undefined) filters.push(({ freeHeight }) => freeHeight !== null && freeHeight <= max_height);
+  if (max_height !== undefined)
+    filters.push(({ freeHeight }) => freeHeight !== null && freeHeight <= max_height);
   if (max_price !== undefined) filters.push(({ price }) => price !== null && price <= max_price);
   return filters;
 }

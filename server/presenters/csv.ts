@@ -11,7 +11,11 @@ export interface CsvStyle {
  * A table as CSV for spreadsheets: RFC 4180, CRLF, header row. A text cell that a spreadsheet would run as a
  * formula is neutralised with a leading apostrophe; numbers never are.
  */
-export function csvOf(header: readonly string[], rows: readonly (readonly Cell[])[], { decimal }: CsvStyle): string {
+export function csvOf(
+  header: readonly string[],
+  rows: readonly (readonly Cell[])[],
+  { decimal }: CsvStyle,
+): string {
   const comma = decimal === "comma";
   return stringify([header, ...rows], {
     record_delimiter: "windows",

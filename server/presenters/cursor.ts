@@ -25,7 +25,10 @@ export function offsetOf(cursor: string | null | undefined, question: object, pa
   if (offset === undefined || mark === undefined)
     throw InputError.at("/cursor", "is not a cursor of this service; leave it out for the first page");
   if (mark !== markOf(question, paged))
-    throw new ProblemError("stale-cursor", "the catalogue or the question has changed since this cursor was given; start again from the first page");
+    throw new ProblemError(
+      "stale-cursor",
+      "the catalogue or the question has changed since this cursor was given; start again from the first page",
+    );
   return Number(offset);
 }
 

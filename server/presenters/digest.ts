@@ -2,7 +2,10 @@ import { createHash } from "node:crypto";
 
 /** A digest of plain data in which the order of keys does not count, in hexadecimal digits. */
 export function digestOf(value: unknown, length: number): string {
-  return createHash("sha256").update(JSON.stringify(sorted(value))).digest("hex").slice(0, length);
+  return createHash("sha256")
+    .update(JSON.stringify(sorted(value)))
+    .digest("hex")
+    .slice(0, length);
 }
 
 function sorted(value: unknown): unknown {

@@ -3,7 +3,8 @@ import type { Cell, CsvStyle } from "./csv.ts";
 import { type Column, tableCsv, type UnitSystem } from "./table.ts";
 
 /** A table in one cell: pairs with a space between, one after the other. */
-const pairs = (table: readonly (readonly [number, number])[]): string => table.map((pair) => pair.join(" ")).join("; ");
+const pairs = (table: readonly (readonly [number, number])[]): string =>
+  table.map((pair) => pair.join(" ")).join("; ");
 
 const axial = (record: IsolatorRecord, key: string): Cell =>
   (record.axial as Readonly<Record<string, number | undefined>>)[key] ?? null;

@@ -66,9 +66,13 @@ function presentMode({ omega, dampingRatio, shape, energy }: Mode) {
 }
 
 /** What the numbers of one option do not say, the reason of every null among them. */
-function notesOf({ analysis, arrangement, price }: Option, { machine, environment }: SelectionRequest): string[] {
+function notesOf(
+  { analysis, arrangement, price }: Option,
+  { machine, environment }: SelectionRequest,
+): string[] {
   const notes: string[] = [];
-  if (analysis.worst === null) notes.push("transmissibility: nothing acts vertically, and the vertical model knows no other direction.");
+  if (analysis.worst === null)
+    notes.push("transmissibility: nothing acts vertically, and the vertical model knows no other direction.");
   else if (finite(analysis.worst.transmissibility) === null)
     notes.push("transmissibility: an undamped natural frequency is met exactly; no bound can be given.");
   if (machine.excitations.length === 0) notes.push("transmitted_force_n: no excitation is stated.");
@@ -99,11 +103,20 @@ const GATE_UNITS = {
   transmitted_force: "N",
 } as const;
 
-const PLAIN_UNITS: Readonly<Record<string, string>> = { lead_time: "days", resonance: "mode over excitation frequency" };
+const PLAIN_UNITS: Readonly<Record<string, string>> = {
+  lead_time: "days",
+  resonance: "mode over excitation frequency",
+};
 
 /** A near miss as JSON, its numbers in the unit it names. */
 export function presentNearMiss({ designation, gate, value, limit }: NearMiss) {
   const unit = gate in GATE_UNITS ? GATE_UNITS[gate as keyof typeof GATE_UNITS] : null;
   const shown = (si: number): number => (unit === null ? si : inUnit(si, unit));
-  return { designation, gate, value: shown(value), limit: shown(limit), unit: unit ?? PLAIN_UNITS[gate] ?? null };
+  return {
+    designation,
+    gate,
+    value: shown(value),
+    limit: shown(limit),
+    unit: unit ?? PLAIN_UNITS[gate] ?? null,
+  };
 }

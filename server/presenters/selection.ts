@@ -21,7 +21,13 @@ export function selectionId(normalised: AskedSelection["normalised"], origin: Or
 }
 
 /** One page of a selection as JSON; `offset` counts the options on the pages before. */
-export function presentSelection(id: string, asked: AskedSelection, selection: Selection, origin: Origin, offset: number) {
+export function presentSelection(
+  id: string,
+  asked: AskedSelection,
+  selection: Selection,
+  origin: Origin,
+  offset: number,
+) {
   const { request, normalised, assumptions } = asked;
   const { counts, needed } = selection;
   const next = offset + normalised.limit;
@@ -61,6 +67,8 @@ export type PresentedSelection = ReturnType<typeof presentSelection>;
 function rankingAssumption({ request }: AskedSelection, { rankedBy }: Selection): readonly string[] {
   if (request.rankBy !== null) return [];
   const why =
-    rankedBy === "price" ? "every option is priced in one currency" : "not every option is priced in one currency";
+    rankedBy === "price"
+      ? "every option is priced in one currency"
+      : "not every option is priced in one currency";
   return [`Ranked by ${rankedBy}: ${why}.`];
 }

@@ -6,7 +6,10 @@ export function valueAt(document: unknown, path: string): unknown {
   return path
     .split(".")
     .reduce<unknown>(
-      (value, key) => (typeof value === "object" && value !== null && Object.hasOwn(value, key) ? Reflect.get(value, key) : undefined),
+      (value, key) =>
+        typeof value === "object" && value !== null && Object.hasOwn(value, key)
+          ? Reflect.get(value, key)
+          : undefined,
       document,
     );
 }

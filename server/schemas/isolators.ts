@@ -4,7 +4,14 @@ import { tableForms } from "./forms.ts";
 import { quantity } from "./quantity.ts";
 
 /** By what a list of isolators can be sorted; a leading minus turns the order round. */
-export const SORTS = ["designation", "load", "stiffness", "natural_frequency", "free_height", "price"] as const;
+export const SORTS = [
+  "designation",
+  "load",
+  "stiffness",
+  "natural_frequency",
+  "free_height",
+  "price",
+] as const;
 export type Sort = (typeof SORTS)[number];
 
 const anyOf = <T extends string>(values: readonly T[], description: string) =>
@@ -20,7 +27,11 @@ export const IsolatorQuery = z.strictObject({
   catalog: z.string().min(1).max(64).optional().meta({ description: "demo when left out." }),
   families: anyOf(FAMILIES, "Families, comma-separated."),
   series: z.string().min(1).max(64).optional(),
-  load: quantity("force", { above: 0, max: 1e9, description: "A static load that it must bear, N." }).optional(),
+  load: quantity("force", {
+    above: 0,
+    max: 1e9,
+    description: "A static load that it must bear, N.",
+  }).optional(),
   natural_frequency_max: quantity("frequency", {
     above: 0,
     max: 1e4,
@@ -36,7 +47,13 @@ export const IsolatorQuery = z.strictObject({
     .enum([...SORTS, ...SORTS.map((sort) => `-${sort}` as const)])
     .optional()
     .meta({ description: "load when left out; a leading minus turns the order round." }),
-  limit: z.coerce.number().int().min(1).max(500).optional().meta({ description: "Isolators on a page; 50 when left out." }),
+  limit: z.coerce
+    .number()
+    .int()
+    .min(1)
+    .max(500)
+    .optional()
+    .meta({ description: "Isolators on a page; 50 when left out." }),
   cursor: z.string().max(200).optional().meta({ description: "next_cursor of the page before." }),
   ...tableForms,
 });

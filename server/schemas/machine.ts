@@ -3,7 +3,10 @@ import { quantity } from "./quantity.ts";
 
 /** A field of the contract that later work fills: refused by name, never silently ignored. */
 export const notYet = (): z.ZodOptional<z.ZodNever> =>
-  z.never({ error: "not yet supported by this version" }).meta({ description: "Not yet supported." }).optional();
+  z
+    .never({ error: "not yet supported by this version" })
+    .meta({ description: "Not yet supported." })
+    .optional();
 
 const coordinate = (description: string) => quantity("length", { min: -1000, max: 1000, description });
 
@@ -25,7 +28,9 @@ export const feet = z
     footCount.meta({ description: "How many feet, when their places are not known." }),
     z
       .strictObject({ count: footCount, length: extent("Along x."), width: extent("Along y.") })
-      .meta({ description: "A footprint: two rows along x; three feet stand two at the back and one in front." }),
+      .meta({
+        description: "A footprint: two rows along x; three feet stand two at the back and one in front.",
+      }),
     z
       .strictObject({ positions: z.array(point).min(3).max(64) })
       .meta({ description: "The elastic centres of the isolators." }),
@@ -34,7 +39,12 @@ export const feet = z
 
 export const speed = z
   .union([
-    quantity("speed", { min: 1, max: 100_000, description: "One running speed.", examples: ["1180 rpm", "19.7 Hz"] }),
+    quantity("speed", {
+      min: 1,
+      max: 100_000,
+      description: "One running speed.",
+      examples: ["1180 rpm", "19.7 Hz"],
+    }),
     z
       .strictObject({
         min: quantity("speed", { min: 1, max: 100_000 }),
@@ -75,7 +85,10 @@ export const excitation = z.union([
     .strictObject({
       kind: z.literal("unbalance"),
       rotor_mass: quantity("mass", { above: 0, max: 1e7, examples: ["120 kg"] }),
-      grade: z.string().max(16).meta({ description: "ISO 21940-11 balance grade.", examples: ["G6.3"] }),
+      grade: z
+        .string()
+        .max(16)
+        .meta({ description: "ISO 21940-11 balance grade.", examples: ["G6.3"] }),
       ...line,
     })
     .meta({ description: "The residual unbalance that a balance grade permits at the top speed." }),
@@ -85,21 +98,36 @@ export const excitation = z.union([
 export const machineFields = {
   name: z.string().max(200).optional().meta({ description: "What you call the machine." }),
   tag: z.string().max(100).optional().meta({ description: "Its number in your list." }),
-  mass: quantity("mass", { min: 0.001, max: 1e7, description: "Mass on the isolators.", examples: ["850 kg", "1874 lb"] }),
+  mass: quantity("mass", {
+    min: 0.001,
+    max: 1e7,
+    description: "Mass on the isolators.",
+    examples: ["850 kg", "1874 lb"],
+  }),
   speed,
-  orders: z.array(order).min(1).max(32).optional().meta({ description: "Multiples of the speed to judge; [1] when left out." }),
+  orders: z
+    .array(order)
+    .min(1)
+    .max(32)
+    .optional()
+    .meta({ description: "Multiples of the speed to judge; [1] when left out." }),
   feet: feet.optional(),
   centre_of_gravity: point.optional(),
   envelope: notYet(),
   inertia: notYet(),
   shaft_axis: axis.optional().meta({ description: "x when left out." }),
-  rotation: z.enum(["right_handed", "left_handed", "either"]).optional().meta({ description: "either when left out." }),
+  rotation: z
+    .enum(["right_handed", "left_handed", "either"])
+    .optional()
+    .meta({ description: "either when left out." }),
   excitation: z.array(excitation).min(1).max(32).optional(),
   run_up: notYet(),
   coast_down: notYet(),
   base: notYet(),
   support: z
-    .strictObject({ kind: z.literal("rigid", { error: "only a rigid support is supported by this version" }) })
+    .strictObject({
+      kind: z.literal("rigid", { error: "only a rigid support is supported by this version" }),
+    })
     .optional(),
   floor_motion: notYet(),
 };

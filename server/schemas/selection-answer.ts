@@ -4,7 +4,8 @@ import { GATES, RANKINGS } from "../../src/selection/index.ts";
 import { SelectionBody } from "./selection.ts";
 
 const number = z.number();
-const known = (description: string) => number.nullable().meta({ description: `${description} Null when it was not computed; see notes.` });
+const known = (description: string) =>
+  number.nullable().meta({ description: `${description} Null when it was not computed; see notes.` });
 
 const Foot = z.looseObject({
   foot: z.int().meta({ description: "Foot number, from 1." }),
@@ -18,13 +19,16 @@ const Mode = z.looseObject({
   frequency_hz: number,
   damping_ratio: number,
   shape: z.enum(["along_x", "along_y", "vertical", "roll", "pitch", "yaw"]),
-  energy: z.array(number).length(6).meta({ description: "Shares of the kinetic energy of x, y, z, roll, pitch, yaw." }),
+  energy: z
+    .array(number)
+    .length(6)
+    .meta({ description: "Shares of the kinetic energy of x, y, z, roll, pitch, yaw." }),
 });
 
 export const OptionAnswer = z
   .looseObject({
     rank: z.int(),
-    designation: z.string().meta({ description: "The isolator, or those mixed, joined by \" + \"." }),
+    designation: z.string().meta({ description: 'The isolator, or those mixed, joined by " + ".' }),
     series: z.string().nullable(),
     family: z.string().meta({ description: `One of ${FAMILIES.join(", ")}.` }),
     quantity: z.int().meta({ description: "Isolators in all, one a foot." }),
@@ -46,7 +50,8 @@ export const OptionAnswer = z
     price: number.nullable(),
     currency: z.string().nullable(),
     unbeaten: z.boolean().meta({
-      description: "No other option is at least as good on price, transmissibility and static deflection and better on one.",
+      description:
+        "No other option is at least as good on price, transmissibility and static deflection and better on one.",
     }),
     notes: z.array(z.string()),
   })
@@ -83,7 +88,9 @@ export const SelectionAnswer = z
       .meta({ description: "Isolators, each once; options are arrangements." }),
     ranked_by: z.enum(RANKINGS),
     options: z.array(OptionAnswer),
-    near_misses: z.array(NearMiss).meta({ description: "What one number alone kept from passing, nearest first." }),
+    near_misses: z
+      .array(NearMiss)
+      .meta({ description: "What one number alone kept from passing, nearest first." }),
     next_cursor: z.string().nullable(),
   })
   .meta({ id: "Selection" });

@@ -8,8 +8,18 @@ import { InputError } from "../../src/errors/index.ts";
 const QUERY = {
   name: { to: ["name"], as: "text", description: "What you call the machine." },
   tag: { to: ["tag"], as: "text", description: "Its number in your list." },
-  mass: { to: ["mass"], as: "quantity", description: "Mass on the isolators, kg or with a unit.", example: "850kg" },
-  speed: { to: ["speed"], as: "quantity", description: "Running speed, rpm or with a unit.", example: "1180rpm" },
+  mass: {
+    to: ["mass"],
+    as: "quantity",
+    description: "Mass on the isolators, kg or with a unit.",
+    example: "850kg",
+  },
+  speed: {
+    to: ["speed"],
+    as: "quantity",
+    description: "Running speed, rpm or with a unit.",
+    example: "1180rpm",
+  },
   speed_min: { to: ["speed", "min"], as: "quantity", description: "Lowest speed of a range." },
   speed_max: { to: ["speed", "max"], as: "quantity", description: "Highest speed of a range." },
   feet: { to: ["feet"], as: "number", description: "Number of feet; 4 when left out.", example: "4" },
@@ -19,17 +29,43 @@ const QUERY = {
   cg_y: { to: ["centre_of_gravity", "y"], as: "quantity", description: "Centre of gravity along y." },
   cg_z: { to: ["centre_of_gravity", "z"], as: "quantity", description: "Centre of gravity above the feet." },
   rotor_mass: { to: ["excitation", "0", "rotor_mass"], as: "quantity", description: "Mass of the rotor." },
-  grade: { to: ["excitation", "0", "grade"], as: "text", description: "ISO 21940-11 balance grade.", example: "G6.3" },
-  force: { to: ["excitation", "0", "amplitude"], as: "quantity", description: "Vertical force once per revolution." },
-  transmissibility: { to: ["target", "transmissibility"], as: "number", description: "Target.", example: "0.08" },
+  grade: {
+    to: ["excitation", "0", "grade"],
+    as: "text",
+    description: "ISO 21940-11 balance grade.",
+    example: "G6.3",
+  },
+  force: {
+    to: ["excitation", "0", "amplitude"],
+    as: "quantity",
+    description: "Vertical force once per revolution.",
+  },
+  transmissibility: {
+    to: ["target", "transmissibility"],
+    as: "number",
+    description: "Target.",
+    example: "0.08",
+  },
   efficiency: { to: ["target", "isolation_efficiency"], as: "number", description: "Target, per cent." },
   max_force: { to: ["target", "transmitted_force"], as: "quantity", description: "Target, zero to peak." },
   families: { to: ["limits", "families"], as: "list", description: "Families allowed, comma-separated." },
-  max_price: { to: ["limits", "price"], as: "number", description: "Highest price of all isolators together." },
+  max_price: {
+    to: ["limits", "price"],
+    as: "number",
+    description: "Highest price of all isolators together.",
+  },
   max_height: { to: ["limits", "free_height"], as: "quantity", description: "Highest free height." },
   captive: { to: ["environment", "captive"], as: "boolean", description: "Only captive isolators." },
-  temp_min: { to: ["environment", "temperature", "min"], as: "quantity", description: "Lowest temperature, °C." },
-  temp_max: { to: ["environment", "temperature", "max"], as: "quantity", description: "Highest temperature, °C." },
+  temp_min: {
+    to: ["environment", "temperature", "min"],
+    as: "quantity",
+    description: "Lowest temperature, °C.",
+  },
+  temp_max: {
+    to: ["environment", "temperature", "max"],
+    as: "quantity",
+    description: "Highest temperature, °C.",
+  },
   mounting: { to: ["mounting"], as: "text", description: "floor or suspended." },
   rank_by: { to: ["rank_by"], as: "text", description: "Order of ranking." },
   catalog: { to: ["catalog"], as: "text", description: "Catalogue to choose from." },
@@ -47,7 +83,11 @@ interface QueryField {
 const FIELDS: readonly (readonly [string, QueryField])[] = Object.entries(QUERY);
 
 /** Keys of `excitation/0` that the query implies, by the name that brings it. */
-const KIND: Readonly<Record<string, string>> = { rotor_mass: "unbalance", grade: "unbalance", force: "force" };
+const KIND: Readonly<Record<string, string>> = {
+  rotor_mass: "unbalance",
+  grade: "unbalance",
+  force: "force",
+};
 
 /** The query of a GET selection: all text; what it means is checked where the body is. */
 export const SelectionQuery = z.strictObject(
@@ -91,7 +131,10 @@ export function queryNameOf(pointer: string): string | undefined {
   const path = pointer.split("/").slice(1);
   const matches = (to: readonly string[]): boolean => path.every((key, i) => to[i] === key);
   if (pointer === "/feet/count") return "feet";
-  return FIELDS.find(([, { to }]) => to.length === path.length && matches(to))?.[0] ?? FIELDS.find(([, { to }]) => matches(to))?.[0];
+  return (
+    FIELDS.find(([, { to }]) => to.length === path.length && matches(to))?.[0] ??
+    FIELDS.find(([, { to }]) => matches(to))?.[0]
+  );
 }
 
 function footprint(query: Readonly<Record<string, string | undefined>>): boolean {

@@ -5,7 +5,9 @@ import { machineFields, notYet } from "./machine.ts";
 import { quantity } from "./quantity.ts";
 
 const temperature = quantity("temperature", { min: -200, max: 1000, examples: ["45 degC"] });
-const currency = z.string().regex(/^[A-Z]{3}$/, { error: "an ISO 4217 code of three capitals, such as \"EUR\"" });
+const currency = z
+  .string()
+  .regex(/^[A-Z]{3}$/, { error: 'an ISO 4217 code of three capitals, such as "EUR"' });
 
 const environment = z.strictObject({
   temperature: z.strictObject({ min: temperature, max: temperature }).optional(),
@@ -23,7 +25,9 @@ const target = z
     equipment_velocity: notYet(),
     judged_on: z.enum(["foot_sum", "net"]).optional(),
   })
-  .meta({ description: "What must hold; all that are given must hold together. Transmissibility 0.1 when left out." });
+  .meta({
+    description: "What must hold; all that are given must hold together. Transmissibility 0.1 when left out.",
+  });
 
 const limits = z.strictObject({
   families: z.array(z.enum(FAMILIES)).min(1).max(FAMILIES.length).optional(),
@@ -47,12 +51,23 @@ export const SelectionBody = z
     uncertainty: notYet(),
     rank_by: z
       .enum(RANKINGS, {
-        error: (issue) => (issue.input === "probability" ? "\"probability\" is not yet supported by this version" : undefined),
+        error: (issue) =>
+          issue.input === "probability" ? '"probability" is not yet supported by this version' : undefined,
       })
       .optional(),
-    catalog: z.string().min(1).max(64).optional().meta({ description: "Catalogue to choose from; demo when left out." }),
+    catalog: z
+      .string()
+      .min(1)
+      .max(64)
+      .optional()
+      .meta({ description: "Catalogue to choose from; demo when left out." }),
     limit: z.int().min(1).max(100).optional().meta({ description: "Options on a page; 10 when left out." }),
-    cursor: z.string().max(200).nullable().optional().meta({ description: "next_cursor of the page before." }),
+    cursor: z
+      .string()
+      .max(200)
+      .nullable()
+      .optional()
+      .meta({ description: "next_cursor of the page before." }),
   })
   .meta({
     id: "SelectionRequest",

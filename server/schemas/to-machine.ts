@@ -40,8 +40,14 @@ export function machineAssumptions(body: MachineBody): readonly string[] {
       body.centre_of_gravity === undefined,
       "The centre of gravity is above the centroid of the feet, so that they share the weight as on equal springs.",
     ],
-    [body.orders === undefined && body.excitation === undefined, "The machine shakes once per revolution (order 1)."],
-    [body.excitation === undefined, "No excitation is stated: a vertical force through the centre of gravity, ratios only."],
+    [
+      body.orders === undefined && body.excitation === undefined,
+      "The machine shakes once per revolution (order 1).",
+    ],
+    [
+      body.excitation === undefined,
+      "No excitation is stated: a vertical force through the centre of gravity, ratios only.",
+    ],
     [body.support === undefined, "The ground is rigid."],
   ];
   return assumed.filter(([holds]) => holds).map(([, text]) => text);
@@ -56,16 +62,25 @@ export function toMachine(body: ReturnType<typeof withMachineDefaults<MachineBod
   const excitations = (body.excitation ?? []).map(toExcitation);
   const orders = ordersOf(body.orders, excitations);
   if (orders.length > MOST_ORDERS)
-    throw InputError.at("/orders", `${orders.length} orders with those of the excitations; at most ${MOST_ORDERS} are evaluated`);
+    throw InputError.at(
+      "/orders",
+      `${orders.length} orders with those of the excitations; at most ${MOST_ORDERS} are evaluated`,
+    );
   const feet = toFeet(body.feet);
   const cg = body.centre_of_gravity;
   if (cg !== undefined && feet === null && (cg.x !== 0 || cg.y !== 0))
-    throw InputError.at("/centre_of_gravity", "says nothing while the places of the feet are unknown; give /feet positions or a footprint");
+    throw InputError.at(
+      "/centre_of_gravity",
+      "says nothing while the places of the feet are unknown; give /feet positions or a footprint",
+    );
   return {
     mass: toSI(body.mass, "mass"),
     footCount: feet?.length ?? (body.feet as number),
-    feet,
-    centreOfGravity: cg === undefined ? null : { x: cg.x, y: cg.y, z: cg.z ?? null },
+    feet: feet?.map((position) => ({ position, axis: UPWARD })) ?? null,
+    centreOfGravity: cg === undefined ? null : { x: cg.x, y: cg.y },
+    rigid: null,
+    excitationPoint: null,
+    points: [],
     speed: toSpeed(body.speed),
     orders,
     excitations,
@@ -77,7 +92,10 @@ export function toMachine(body: ReturnType<typeof withMachineDefaults<MachineBod
 function toSpeed(speed: MachineBody["speed"]): Machine["speed"] {
   if (typeof speed === "number") return { min: toSI(speed, "speed"), max: toSI(speed, "speed") };
   if (speed.max <= speed.min)
-    throw InputError.at("/speed/max", `${speed.max} rpm is not above the minimum of ${speed.min} rpm; give one speed when there is no range`);
+    throw InputError.at(
+      "/speed/max",
+      `${speed.max} rpm is not above the minimum of ${speed.min} rpm; give one speed when there is no range`,
+    );
   return { min: toSI(speed.min, "speed"), max: toSI(speed.max, "speed") };
 }
 
@@ -100,7 +118,8 @@ function toExcitation(body: ExcitationBody, index: number): Excitation {
   if (body.kind === "force") {
     const direction = body.direction ?? UPWARD;
     const length = norm(direction);
-    if (length === 0) throw InputError.at(`/excitation/${index}/direction`, "a direction of length zero points nowhere");
+    if (length === 0)
+      throw InputError.at(`/excitation/${index}/direction`, "a direction of length zero points nowhere");
     const [x, y, z] = direction;
     return {
       kind: "force",
@@ -110,7 +129,11 @@ function toExcitation(body: ExcitationBody, index: number): Excitation {
     };
   }
   if ("moment" in body)
-    return { kind: "unbalance", unbalance: { kind: "moment", moment: toSI(body.moment, "unbalance") }, ...line };
+    return {
+      kind: "unbalance",
+      unbalance: { kind: "moment", moment: toSI(body.moment, "unbalance") },
+      ...line,
+    };
   const grade = parseGrade(body.grade);
   if (!grade.ok) throw InputError.at(`/excitation/${index}/grade`, grade.reason);
   return {

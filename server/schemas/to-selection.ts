@@ -25,12 +25,16 @@ export function understand(body: SelectionBody): AskedSelection {
   const normalised = normalise(body);
   const { environment, target, limits } = normalised;
   if (target.transmitted_force !== undefined && body.excitation === undefined)
-    throw InputError.at("/target/transmitted_force", "cannot be judged without an excitation; state what shakes the machine");
+    throw InputError.at(
+      "/target/transmitted_force",
+      "cannot be judged without an excitation; state what shakes the machine",
+    );
   const { temperature } = environment;
   if (temperature && temperature.max < temperature.min)
     throw InputError.at("/environment/temperature/max", "is below the minimum");
   const optional = <T>(value: T | undefined): T | null => value ?? null;
-  const metres = (value: number | undefined): number | null => (value === undefined ? null : toSI(value, "length"));
+  const metres = (value: number | undefined): number | null =>
+    value === undefined ? null : toSI(value, "length");
   return {
     normalised,
     assumptions: [...machineAssumptions(body), ...selectionAssumptions(body)],
@@ -72,7 +76,9 @@ function normalise(body: SelectionBody) {
     ...withMachineDefaults(body),
     mounting: body.mounting ?? ("floor" as const),
     environment: body.environment ?? {},
-    target: statesTarget(body) ? { ...body.target } : { ...body.target, transmissibility: DEFAULT_TRANSMISSIBILITY },
+    target: statesTarget(body)
+      ? { ...body.target }
+      : { ...body.target, transmissibility: DEFAULT_TRANSMISSIBILITY },
     limits: { ...limits, ratings_per_arrangement: limits.ratings_per_arrangement ?? DEFAULT_RATINGS },
     catalog: body.catalog ?? DEFAULT_CATALOG,
     limit: body.limit ?? DEFAULT_PAGE,

@@ -2,7 +2,13 @@ import { type Isolator, staticDeflection, staticStiffness } from "../isolator/in
 import { type Excitation, forceOf, type Machine, norm, sensesOf } from "../machine/index.ts";
 import type { Analysis, FootState, SteadyState } from "./analysis.ts";
 import { footLoads } from "./foot-loads.ts";
-import { dampingRatio, naturalFrequency, transmissibilityOf, type VerticalModel, verticalModel } from "./vertical.ts";
+import {
+  dampingRatio,
+  naturalFrequency,
+  transmissibilityOf,
+  type VerticalModel,
+  verticalModel,
+} from "./vertical.ts";
 import { worstOver } from "./worst.ts";
 
 /** Forces whose resultant is under this share of the sum of their moduli cancel. */
@@ -65,7 +71,9 @@ function arrangementLoads(machine: Machine, isolators: readonly Isolator[]): rea
       return load > 0 ? load / staticDeflection(isolator, load) : staticStiffness(isolator, 0);
     });
     const next = footLoads(machine, secants);
-    const moved = next.some((load, foot) => Math.abs(load - (loads[foot] as number)) > LOAD_TOLERANCE * machine.mass);
+    const moved = next.some(
+      (load, foot) => Math.abs(load - (loads[foot] as number)) > LOAD_TOLERANCE * machine.mass,
+    );
     loads = next;
     if (!moved) break;
   }
@@ -118,10 +126,12 @@ function worstSteadyStates(
 
     const resonance = [omega / order];
     const candidate = entry(worstOver(transmissibility, min, max, resonance).at);
-    if (worst === null || (candidate.transmissibility ?? 0) > (worst.transmissibility ?? 0)) worst = candidate;
+    if (worst === null || (candidate.transmissibility ?? 0) > (worst.transmissibility ?? 0))
+      worst = candidate;
     if (applied(max) === undefined) continue;
     const byForce = entry(worstOver(force, min, max, resonance).at);
-    if (worstForce === null || (byForce.transmittedForce ?? 0) > (worstForce.transmittedForce ?? 0)) worstForce = byForce;
+    if (worstForce === null || (byForce.transmittedForce ?? 0) > (worstForce.transmittedForce ?? 0))
+      worstForce = byForce;
   }
   return { worst, worstForce };
 }

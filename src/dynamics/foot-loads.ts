@@ -20,16 +20,17 @@ export function footLoads(machine: Machine, stiffness?: readonly number[]): read
   const weight = machine.mass * STANDARD_GRAVITY;
   if (feet === null) return new Array<number>(footCount).fill(weight / footCount);
 
-  const [x0, y0] = centroid(feet);
+  const places = feet.map((foot) => foot.position);
+  const [x0, y0] = centroid(places);
   const cg = machine.centreOfGravity ?? { x: x0, y: y0 };
-  if (!withinOutline(feet, cg.x, cg.y))
+  if (!withinOutline(places, cg.x, cg.y))
     throw InputError.at("/centre_of_gravity", "lies outside the outline of the feet: the machine would tip");
 
   const k = stiffness ?? new Array<number>(footCount).fill(1);
   const total = k.reduce((s, v) => s + v, 0);
   const mean = (value: (i: number) => number): number => k.reduce((s, v, i) => s + v * value(i), 0) / total;
-  const x = feet.map((p) => p[0]);
-  const y = feet.map((p) => p[1]);
+  const x = places.map((p) => p[0]);
+  const y = places.map((p) => p[1]);
   // About the elastic centre the balance of force drops out and a 2 × 2 system is left for the tilt.
   const ex = mean((i) => x[i] as number);
   const ey = mean((i) => y[i] as number);

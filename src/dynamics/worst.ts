@@ -33,7 +33,8 @@ export function worstOver(
   const points = Array.from({ length: SCAN_POINTS }, (_, i) => lo * ratio ** (i / (SCAN_POINTS - 1)));
   points[SCAN_POINTS - 1] = hi;
   for (const peak of resonances)
-    for (const times of AROUND_RESONANCE) if (peak * times > lo && peak * times < hi) points.push(peak * times);
+    for (const times of AROUND_RESONANCE)
+      if (peak * times > lo && peak * times < hi) points.push(peak * times);
   points.sort((a, b) => a - b);
 
   const samples = points.map((at): Maximum => ({ at, value: f(at) }));
@@ -44,7 +45,8 @@ export function worstOver(
     const left = samples[Math.max(i - 1, 0)] as Maximum;
     const right = samples[Math.min(i + 1, samples.length - 1)] as Maximum;
     const peaked = sample.value >= left.value && sample.value >= right.value;
-    if (peaked && sample.value >= floor && left.at < right.at) best = largest(best, refine(f, left.at, right.at));
+    if (peaked && sample.value >= floor && left.at < right.at)
+      best = largest(best, refine(f, left.at, right.at));
   });
   return best;
 }

@@ -24,8 +24,8 @@ export interface ForceExcitation extends Line {
 export interface UnbalanceExcitation extends Line {
   readonly kind: "unbalance";
   readonly unbalance:
-    | { readonly kind: "moment"; /** kg·m */ readonly moment: number }
-    | { readonly kind: "grade"; /** kg */ readonly rotorMass: number; /** m/s */ readonly grade: number };
+    | { readonly kind: "moment" /** kg·m */; readonly moment: number }
+    | { readonly kind: "grade" /** kg */; readonly rotorMass: number /** m/s */; readonly grade: number };
 }
 
 export type Excitation = ForceExcitation | UnbalanceExcitation;

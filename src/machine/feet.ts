@@ -25,7 +25,10 @@ export function footprintPositions(count: number, length: number, width: number)
       [a, 0, 0],
     ];
   if (count % 2 !== 0)
-    throw InputError.at("/feet/count", `a footprint carries 3 feet or an even number, not ${count}; give positions`);
+    throw InputError.at(
+      "/feet/count",
+      `a footprint carries 3 feet or an even number, not ${count}; give positions`,
+    );
   const perRow = count / 2;
   const row = (y: number): Vec3[] =>
     Array.from({ length: perRow }, (_, i): Vec3 => [-a + (length * i) / (perRow - 1), y, 0]);
@@ -48,7 +51,10 @@ export function requireCarryingFeet(feet: readonly Vec3[]): void {
   feet.forEach((p, i) => {
     const j = feet.findIndex((q) => Math.hypot(p[0] - q[0], p[1] - q[1]) <= COINCIDENT * span);
     if (j < i)
-      throw InputError.at(`/feet/positions/${i}`, `foot ${i + 1} stands in the same place in plan as foot ${j + 1}`);
+      throw InputError.at(
+        `/feet/positions/${i}`,
+        `foot ${i + 1} stands in the same place in plan as foot ${j + 1}`,
+      );
   });
   const [cx, cy] = centroid(feet);
   const sxx = feet.reduce((s, p) => s + (p[0] - cx) ** 2, 0);

@@ -1,3 +1,4 @@
+export { BASE_DENSITY, type BaseMaterial, type Slab, slabBody, slabMass } from "./base.ts";
 export {
   type Excitation,
   type ForceExcitation,
@@ -9,5 +10,13 @@ export {
   unbalanceMoment,
 } from "./excitation.ts";
 export { centroid, footprintPositions, requireCarryingFeet, withinOutline } from "./feet.ts";
-export type { Axis, Machine, Rotation, SpeedRange } from "./machine.ts";
+export type { Axis, Foot, Machine, NamedPoint, Rotation, SpeedRange } from "./machine.ts";
+export {
+  boxInertia,
+  combine,
+  type Inertia,
+  principalMoments,
+  type RigidBody,
+  requirePossibleInertia,
+} from "./rigid-body.ts";
 export { type Complex, type ComplexVec3, norm, type Vec3 } from "./vector.ts";

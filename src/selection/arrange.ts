@@ -51,7 +51,11 @@ export function arrangements(
 }
 
 /** The most level pairing of an isolator with another of its series that uses both. */
-function bestCompany(isolator: Isolator, series: readonly Isolator[], loads: readonly number[]): Arrangement | undefined {
+function bestCompany(
+  isolator: Isolator,
+  series: readonly Isolator[],
+  loads: readonly number[],
+): Arrangement | undefined {
   let best: Arrangement | undefined;
   let least = Number.POSITIVE_INFINITY;
   for (const other of series) {

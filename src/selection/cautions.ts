@@ -17,17 +17,24 @@ export function cautionsFor(request: SelectionRequest): readonly string[] {
   const cautions: string[] = [];
   const { feet, centreOfGravity: cg } = machine;
   if (feet !== null && cg !== null) {
-    const [x, y] = centroid(feet);
-    const span = Math.max(...feet.flatMap((p) => feet.map((q) => Math.hypot(p[0] - q[0], p[1] - q[1]))));
+    const places = feet.map((foot) => foot.position);
+    const [x, y] = centroid(places);
+    const span = Math.max(...places.flatMap((p) => places.map((q) => Math.hypot(p[0] - q[0], p[1] - q[1]))));
     if (Math.hypot(cg.x - x, cg.y - y) > OFF_CENTRE * span)
       cautions.push(
         "The centre of gravity is off the centre of the feet: the machine also rocks, which the vertical model does not show.",
       );
   }
   if (machine.speed.min < machine.speed.max)
-    cautions.push("Over a speed range the machine may dwell at a natural frequency: see each option's notes.");
-  cautions.push("Every start and stop passes through the natural frequency: keep people clear while it does.");
+    cautions.push(
+      "Over a speed range the machine may dwell at a natural frequency: see each option's notes.",
+    );
+  cautions.push(
+    "Every start and stop passes through the natural frequency: keep people clear while it does.",
+  );
   if (mounting === "suspended")
-    cautions.push("A suspended machine needs an independent means of holding it should a hanger fail; keep clear below.");
+    cautions.push(
+      "A suspended machine needs an independent means of holding it should a hanger fail; keep clear below.",
+    );
   return [...cautions, ...STANDING];
 }

@@ -68,13 +68,17 @@ function targetChecks({ target }: SelectionRequest, { worst, worstForce }: Analy
 }
 
 function marginOf(targets: readonly Check[]): number | null {
-  const margins = targets.map(({ value, limit }) => (value === null || limit === null ? null : limit / value));
+  const margins = targets.map(({ value, limit }) =>
+    value === null || limit === null ? null : limit / value,
+  );
   return margins.includes(null) ? null : Math.min(...(margins as number[]));
 }
 
 /** At a fixed speed no mode may lie close to an excitation line; reports the nearest, as mode over line. */
 function resonanceCheck({ machine }: SelectionRequest, { modes }: Analysis): Check {
-  const ratios = modes.flatMap((mode) => machine.orders.map((order) => mode.omega / (order * machine.speed.max)));
+  const ratios = modes.flatMap((mode) =>
+    machine.orders.map((order) => mode.omega / (order * machine.speed.max)),
+  );
   const nearest = ratios.reduce((a, b) => (Math.abs(b - 1) < Math.abs(a - 1) ? b : a));
   return {
     gate: "resonance",
@@ -84,7 +88,10 @@ function resonanceCheck({ machine }: SelectionRequest, { modes }: Analysis): Che
   };
 }
 
-function priceOf(arrangement: Arrangement): { readonly price: number | null; readonly currency: string | null } {
+function priceOf(arrangement: Arrangement): {
+  readonly price: number | null;
+  readonly currency: string | null;
+} {
   const currency = arrangement[0]?.currency ?? null;
   let price = 0;
   for (const isolator of arrangement) {

@@ -26,7 +26,10 @@ function missOf({ value, limit }: Check): number {
   return Math.max(value / limit, limit / value);
 }
 
-function nearMiss(designation: string, checks: readonly Check[]): (NearMiss & { readonly miss: number }) | undefined {
+function nearMiss(
+  designation: string,
+  checks: readonly Check[],
+): (NearMiss & { readonly miss: number }) | undefined {
   const [failed, ...others] = checks.filter((check) => !check.passed);
   if (failed === undefined || others.length > 0) return undefined;
   const { gate, value, limit } = failed;
@@ -56,7 +59,8 @@ export function nearMisses(rejects: Rejects): readonly NearMiss[] {
   const { request, columns, rows, failed, sites, loads } = rejects;
   const found = new Map<string, NearMiss & { readonly miss: number }>();
   const keep = (miss: ReturnType<typeof nearMiss>): void => {
-    if (miss && miss.miss < (found.get(miss.designation)?.miss ?? Infinity)) found.set(miss.designation, miss);
+    if (miss && miss.miss < (found.get(miss.designation)?.miss ?? Infinity))
+      found.set(miss.designation, miss);
   };
   for (const { arrangement, checks } of failed)
     keep(nearMiss([...new Set(arrangement.map((i) => i.designation))].join(" + "), checks));
@@ -82,7 +86,10 @@ export function nearMisses(rejects: Rejects): readonly NearMiss[] {
 /** How far the isolator alone misses by its columns, when it misses one number only; else Infinity. */
 function quickMiss({ request, columns, sites, loads, lines }: Rejects, row: number): number {
   const isolator = columns.isolators[row] as Isolator;
-  const misses = sites.map((site) => site.check(isolator)).filter((check) => !check.passed).map(missOf);
+  const misses = sites
+    .map((site) => site.check(isolator))
+    .filter((check) => !check.passed)
+    .map(missOf);
   const overload = Math.max(...loads) / (columns.maxLoad[row] as number);
   const underload = (columns.minLoad[row] as number) / Math.min(...loads);
   for (const miss of [overload, underload]) if (miss > 1) misses.push(miss);

@@ -33,8 +33,14 @@ export function rank(passing: readonly Evaluated[], rankBy: Ranking | null, curr
     stability: (option) => option.analysis.staticDeflection,
     margin: (option) => -(option.margin ?? 0),
   };
-  const order = [rankedBy, ...RANKINGS.filter((ranking) => ranking !== rankedBy)].map((ranking) => keys[ranking]);
-  const rows = passing.map((option) => ({ option, keys: order.map((key) => key(option)), name: nameOf(option) }));
+  const order = [rankedBy, ...RANKINGS.filter((ranking) => ranking !== rankedBy)].map(
+    (ranking) => keys[ranking],
+  );
+  const rows = passing.map((option) => ({
+    option,
+    keys: order.map((key) => key(option)),
+    name: nameOf(option),
+  }));
   rows.sort((a, b) => compareKeys(a.keys, b.keys) || (a.name < b.name ? -1 : a.name > b.name ? 1 : 0));
   const sorted = rows.map(({ option }) => option);
   const beaten = beatenOf(sorted, priced);
@@ -46,7 +52,9 @@ export function rank(passing: readonly Evaluated[], rankBy: Ranking | null, curr
 
 /** The force transmitted, or without an excitation the share of it. */
 function transmitted({ analysis }: Evaluated): number {
-  return analysis.worstForce?.transmittedForce ?? analysis.worst?.transmissibility ?? Number.POSITIVE_INFINITY;
+  return (
+    analysis.worstForce?.transmittedForce ?? analysis.worst?.transmissibility ?? Number.POSITIVE_INFINITY
+  );
 }
 
 function nameOf({ arrangement }: Evaluated): string {
@@ -66,15 +74,23 @@ function compareKeys(a: readonly number[], b: readonly number[]): number {
 /** The currency that most options are priced in; the first in alphabetical order when they tie. */
 function commonCurrency(passing: readonly Evaluated[]): string | null {
   const counts = new Map<string, number>();
-  for (const { currency } of passing) if (currency !== null) counts.set(currency, (counts.get(currency) ?? 0) + 1);
+  for (const { currency } of passing)
+    if (currency !== null) counts.set(currency, (counts.get(currency) ?? 0) + 1);
   return [...counts].sort(([a, m], [b, n]) => n - m || (a < b ? -1 : 1))[0]?.[0] ?? null;
 }
 
 /** The options that another one beats. */
-function beatenOf(options: readonly Evaluated[], priced: (option: Evaluated) => number): ReadonlySet<Evaluated> {
+function beatenOf(
+  options: readonly Evaluated[],
+  priced: (option: Evaluated) => number,
+): ReadonlySet<Evaluated> {
   const rows = options.map((option) => ({
     option,
-    keys: [priced(option), option.analysis.worst?.transmissibility ?? Infinity, option.analysis.staticDeflection],
+    keys: [
+      priced(option),
+      option.analysis.worst?.transmissibility ?? Infinity,
+      option.analysis.staticDeflection,
+    ],
   }));
   rows.sort((a, b) => compareKeys(a.keys, b.keys));
   const beaten = new Set<Evaluated>();
@@ -82,7 +98,8 @@ function beatenOf(options: readonly Evaluated[], priced: (option: Evaluated) => 
   const front: (readonly number[])[] = [];
   for (const { option, keys } of rows) {
     const beats = (other: readonly number[]): boolean =>
-      other.every((value, i) => value <= (keys[i] as number)) && other.some((value, i) => value < (keys[i] as number));
+      other.every((value, i) => value <= (keys[i] as number)) &&
+      other.some((value, i) => value < (keys[i] as number));
     if (front.some(beats)) beaten.add(option);
     else front.push(keys);
   }

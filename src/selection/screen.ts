@@ -42,7 +42,9 @@ export function screen(columns: IsolatorColumns, { loads, mass, lines }: ScreenT
   } else {
     for (let row = begin; row < end; row++) {
       rows[kept] = row;
-      kept += loads.some((load) => load >= (minLoad[row] as number) && load <= (maxLoad[row] as number)) ? 1 : 0;
+      kept += loads.some((load) => load >= (minLoad[row] as number) && load <= (maxLoad[row] as number))
+        ? 1
+        : 0;
     }
   }
   for (const line of binding(lines)) kept = keepUnder(columns, rows, kept, lightest, mass, line);
@@ -57,7 +59,8 @@ export function screen(columns: IsolatorColumns, { loads, mass, lines }: ScreenT
 function binding(lines: readonly ScreenLine[]): readonly ScreenLine[] {
   /** Square of the natural frequency that an undamped isolator may have. */
   const allowed = ({ omega, limit }: ScreenLine): number => (omega * omega * limit) / (1 + limit);
-  const implies = (a: ScreenLine, b: ScreenLine): boolean => a.limit <= 1 && a.omega <= b.omega && a.limit <= b.limit;
+  const implies = (a: ScreenLine, b: ScreenLine): boolean =>
+    a.limit <= 1 && a.omega <= b.omega && a.limit <= b.limit;
   const decides = (line: ScreenLine, i: number): boolean =>
     !lines.some((other, j) => implies(other, line) && (j < i || !implies(line, other)));
   return lines.filter(decides).sort((a, b) => allowed(a) - allowed(b));

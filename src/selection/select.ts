@@ -75,7 +75,8 @@ export function select(request: SelectionRequest, columns: IsolatorColumns): Sel
     if (used.has(isolator)) return;
     rejected.push(row);
     if (failedAt[row] === 0)
-      failedAt[row] = furthest.get(isolator) ?? placeOf(gateByColumns(columns, row, loads, machine.mass, lines));
+      failedAt[row] =
+        furthest.get(isolator) ?? placeOf(gateByColumns(columns, row, loads, machine.mass, lines));
   });
   const { options, rankedBy } = rank(passing, request.rankBy, limits.currency);
   return {
@@ -137,7 +138,9 @@ function gateByColumns(
   if (loads.some((load) => load <= 0)) return "uplift";
   const load = loads[0] as number;
   const stated = lines.filter((line) => line.gate === "transmissibility");
-  return overTarget(columns, row, load, mass / loads.length, stated) > 1 ? "transmissibility" : "transmitted_force";
+  return overTarget(columns, row, load, mass / loads.length, stated) > 1
+    ? "transmissibility"
+    : "transmitted_force";
 }
 
 /** How many rows fell at each gate, in the order of the gates. */

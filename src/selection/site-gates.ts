@@ -32,7 +32,8 @@ function limited(gate: Gate, limit: number, value: (isolator: Isolator) => numbe
 
 /** Price of an isolator on every foot in the currency asked for; `null` when it is not priced so. */
 function priceOnEveryFoot({ machine, limits }: SelectionRequest, isolator: Isolator): number | null {
-  if (isolator.price === null || (limits.currency !== null && isolator.currency !== limits.currency)) return null;
+  if (isolator.price === null || (limits.currency !== null && isolator.currency !== limits.currency))
+    return null;
   return isolator.price * machine.footCount;
 }
 
@@ -42,7 +43,9 @@ export function siteGates(request: SelectionRequest): readonly SiteGate[] {
   const gates: SiteGate[] = [];
   const families = limits.families;
   if (families !== null) gates.push(judged("family", (isolator) => families.includes(isolator.family)));
-  gates.push(judged("mounting", (isolator) => (isolator.family === "spring_hanger") === (mounting === "suspended")));
+  gates.push(
+    judged("mounting", (isolator) => (isolator.family === "spring_hanger") === (mounting === "suspended")),
+  );
   if (environment.captive) gates.push(judged("captive", (isolator) => isolator.captive));
   const site = environment.temperature;
   if (site !== null)
@@ -54,7 +57,8 @@ export function siteGates(request: SelectionRequest): readonly SiteGate[] {
   if (environment.exposures.length > 0)
     gates.push(judged("exposure", ({ resists }) => environment.exposures.every((e) => resists.includes(e))));
   if (limits.freeHeight !== null) gates.push(limited("free_height", limits.freeHeight, (i) => i.freeHeight));
-  if (limits.leadTimeDays !== null) gates.push(limited("lead_time", limits.leadTimeDays, (i) => i.leadTimeDays));
+  if (limits.leadTimeDays !== null)
+    gates.push(limited("lead_time", limits.leadTimeDays, (i) => i.leadTimeDays));
   if (limits.price !== null) gates.push(limited("price", limits.price, (i) => priceOnEveryFoot(request, i)));
   return gates;
 }

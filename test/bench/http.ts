@@ -25,7 +25,11 @@ async function requestsPerSecond(url: string): Promise<number> {
     url,
     connections: CONNECTIONS,
     duration: SECONDS,
-    requests: BODIES.map((body) => ({ method: "POST", body, headers: { "content-type": "application/json" } })),
+    requests: BODIES.map((body) => ({
+      method: "POST",
+      body,
+      headers: { "content-type": "application/json" },
+    })),
   });
   if (result.non2xx > 0 || result.errors > 0)
     throw new Error(`${url} answered ${result.non2xx} requests badly and failed ${result.errors}`);
@@ -40,12 +44,16 @@ export async function benchHttp(): Promise<void> {
   try {
     const rates = await inTurn([`${bare.url}/`, `${ours.url}/v1/selections`]);
     const [bareRate, ourRate] = rates.map(median) as [number, number];
-    console.log(`\nThe smallest selection over HTTP, ${MACHINES} different machines, ${CONNECTIONS} connections`);
+    console.log(
+      `\nThe smallest selection over HTTP, ${MACHINES} different machines, ${CONNECTIONS} connections`,
+    );
     console.log(`  bare Express route, parse and echo   ${bareRate.toFixed(0).padStart(7)} requests/s`);
     console.log(
       `  POST /v1/selections                  ${ourRate.toFixed(0).padStart(7)} requests/s  ${(ourRate / bareRate).toFixed(2)}×  goal ≥ 0.5×`,
     );
-    console.log(`  memory of the service after this     ${ours.memory().toFixed(0).padStart(7)} MB          goal < 150 MB`);
+    console.log(
+      `  memory of the service after this     ${ours.memory().toFixed(0).padStart(7)} MB          goal < 150 MB`,
+    );
   } finally {
     await stopAll([bare, ours]);
     rmSync(data, { recursive: true });

@@ -82,7 +82,17 @@ export function benchScreen(): void {
   print(`Screening ${COUNT} isolators (${kept} pass at one frequency)`, [
     { name: "sum of five float64 columns", median: sum, ratio: null, goal: "" },
     { name: "screen, one frequency", median: atOne, ratio: atOne / sum, goal: "goal ≤ 1.2× the sum" },
-    { name: "screen, three frequencies, one limit", median: atThree, ratio: atThree / sum, goal: "no slower" },
-    { name: "screen, three frequencies, falling limits", median: atFalling, ratio: atFalling / sum, goal: "no slower" },
+    {
+      name: "screen, three frequencies, one limit",
+      median: atThree,
+      ratio: atThree / sum,
+      goal: "no slower",
+    },
+    {
+      name: "screen, three frequencies, falling limits",
+      median: atFalling,
+      ratio: atFalling / sum,
+      goal: "no slower",
+    },
   ]);
 }

@@ -15,7 +15,10 @@ export interface Service {
 }
 
 /** Starts a compiled program of ours and waits for the address that it prints. */
-export function startService(script: URL, environment: Readonly<Record<string, string>> = {}): Promise<Service> {
+export function startService(
+  script: URL,
+  environment: Readonly<Record<string, string>> = {},
+): Promise<Service> {
   const start = performance.now();
   const child: ChildProcess = spawn(process.execPath, [script.pathname], {
     env: { ...process.env, PORT: "0", ...environment },
@@ -23,7 +26,9 @@ export function startService(script: URL, environment: Readonly<Record<string, s
   });
   return new Promise((resolve, reject) => {
     let printed = "";
-    child.once("exit", (code) => reject(new Error(`${script.pathname} ended with ${code} before it listened`)));
+    child.once("exit", (code) =>
+      reject(new Error(`${script.pathname} ended with ${code} before it listened`)),
+    );
     child.stdout?.on("data", (chunk: Buffer) => {
       printed += chunk.toString();
       const [url] = ADDRESS.exec(printed) ?? [];

@@ -23,7 +23,9 @@ export async function benchStart(): Promise<void> {
     for (let round = 0; round < ROUNDS; round++) times.push(await start());
     console.log("\nStart of the service");
     console.log(`  first start, empty folder            ${first.toFixed(0).padStart(7)} ms`);
-    console.log(`  start on an existing folder          ${median(times).toFixed(0).padStart(7)} ms          goal ≤ 1000 ms`);
+    console.log(
+      `  start on an existing folder          ${median(times).toFixed(0).padStart(7)} ms          goal ≤ 1000 ms`,
+    );
   } finally {
     rmSync(data, { recursive: true });
   }

@@ -1,7 +1,6 @@
 import { describe, expect, test } from "vitest";
-import { transmissibilityOf, worstOver } from "../../src/dynamics/index.ts";
 import { permissibleUnbalance } from "../../src/criteria/index.ts";
-import { expectClose } from "../support/expect-close.ts";
+import { transmissibilityOf, worstOver } from "../../src/dynamics/index.ts";
 import {
   RATIOS,
   STRUCTURAL_RATIOS,
@@ -9,6 +8,7 @@ import {
   VISCOUS_PEAKS,
   VISCOUS_TABLE,
 } from "../references/transmissibility.ts";
+import { expectClose } from "../support/expect-close.ts";
 
 const rpm = (n: number): number => (n * 2 * Math.PI) / 60;
 
@@ -43,8 +43,14 @@ describe("transmissibility of one degree of freedom", () => {
 
   test("is 1 at √2 times the natural frequency, whatever the damping", () => {
     for (const damping of [0, 0.01, 0.1, 0.5, 1, 3]) {
-      expectClose(viscous(damping, Math.SQRT2), 1, { rtol: 1e-14, because: "an identity but for rounding of √2" });
-      expectClose(structural(damping, Math.SQRT2), 1, { rtol: 1e-14, because: "an identity but for rounding of √2" });
+      expectClose(viscous(damping, Math.SQRT2), 1, {
+        rtol: 1e-14,
+        because: "an identity but for rounding of √2",
+      });
+      expectClose(structural(damping, Math.SQRT2), 1, {
+        rtol: 1e-14,
+        because: "an identity but for rounding of √2",
+      });
     }
   });
 
@@ -59,7 +65,10 @@ describe("the worst over a range", () => {
     test(`finds the published peak at ζ = ${zeta}`, () => {
       const found = worstOver((r) => viscous(zeta, r), 0.1, 5, [1]);
       expectClose(found.value, peak, { rtol: 1e-5, because: "printed to six figures" });
-      expectClose(found.at, ratio, { rtol: 1e-3, because: "the peak is flat: its place is known to the root of its height" });
+      expectClose(found.at, ratio, {
+        rtol: 1e-3,
+        because: "the peak is flat: its place is known to the root of its height",
+      });
     });
 
   test("is the value itself when the range is one point", () => {

@@ -30,28 +30,62 @@ describe("a footprint", () => {
 
 describe("feet that cannot carry a machine", () => {
   test("on one line are refused", () => {
-    expect(() => requireCarryingFeet([[0, 0, 0], [1, 1, 0], [2, 2, 0.5]])).toThrow("on one line");
+    expect(() =>
+      requireCarryingFeet([
+        [0, 0, 0],
+        [1, 1, 0],
+        [2, 2, 0.5],
+      ]),
+    ).toThrow("on one line");
   });
 
   test("in one place are refused, naming both", () => {
-    expect(() => requireCarryingFeet([[0, 0, 0], [1, 0, 0], [0, 1, 0], [1, 0, 0.2]])).toThrow(
-      "/feet/positions/3: foot 4 stands in the same place in plan as foot 2",
-    );
+    expect(() =>
+      requireCarryingFeet([
+        [0, 0, 0],
+        [1, 0, 0],
+        [0, 1, 0],
+        [1, 0, 0.2],
+      ]),
+    ).toThrow("/feet/positions/3: foot 4 stands in the same place in plan as foot 2");
   });
 
   test("but a flat triangle still carries", () => {
-    expect(() => requireCarryingFeet([[0, 0, 0], [2, 0, 0], [1, 0.01, 0]])).not.toThrow();
+    expect(() =>
+      requireCarryingFeet([
+        [0, 0, 0],
+        [2, 0, 0],
+        [1, 0.01, 0],
+      ]),
+    ).not.toThrow();
   });
 });
 
 describe("the outline of the feet", () => {
-  const feet = [[0, 0, 0], [4, 0, 0], [4, 2, 0], [0, 2, 0], [2, 1, 0]] as const;
+  const feet = [
+    [0, 0, 0],
+    [4, 0, 0],
+    [4, 2, 0],
+    [0, 2, 0],
+    [2, 1, 0],
+  ] as const;
 
-  test.each([[1, 1], [3.9, 0.1], [2, 0], [0, 0], [2, 1]])("holds (%d, %d)", (x, y) => {
+  test.each([
+    [1, 1],
+    [3.9, 0.1],
+    [2, 0],
+    [0, 0],
+    [2, 1],
+  ])("holds (%d, %d)", (x, y) => {
     expect(withinOutline(feet, x, y)).toBe(true);
   });
 
-  test.each([[4.01, 1], [-0.01, 0], [2, -0.01], [5, 5]])("leaves out (%d, %d)", (x, y) => {
+  test.each([
+    [4.01, 1],
+    [-0.01, 0],
+    [2, -0.01],
+    [5, 5],
+  ])("leaves out (%d, %d)", (x, y) => {
     expect(withinOutline(feet, x, y)).toBe(false);
   });
 

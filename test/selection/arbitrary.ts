@@ -1,6 +1,6 @@
 import fc from "fast-check";
 import type { Isolator } from "../../src/isolator/index.ts";
-import type { Machine } from "../../src/machine/index.ts";
+import type { Foot, Machine, Vec3 } from "../../src/machine/index.ts";
 import type { SelectionRequest } from "../../src/selection/index.ts";
 
 /** An isolator of plain properties; what a test is about it overrides. */
@@ -32,6 +32,11 @@ export function isolator(overrides: Partial<Isolator> = {}): Isolator {
   };
 }
 
+/** Feet with upright isolators. */
+export function uprightFeet(positions: readonly Vec3[]): readonly Foot[] {
+  return positions.map((position) => ({ position, axis: [0, 0, 1] }));
+}
+
 export function machine(overrides: Partial<Machine> = {}): Machine {
   const speed = (1180 * 2 * Math.PI) / 60;
   return {
@@ -39,6 +44,9 @@ export function machine(overrides: Partial<Machine> = {}): Machine {
     footCount: 4,
     feet: null,
     centreOfGravity: null,
+    rigid: null,
+    excitationPoint: null,
+    points: [],
     speed: { min: speed, max: speed },
     orders: [1],
     excitations: [],
@@ -77,8 +85,14 @@ const arbitraryIsolator: fc.Arbitrary<Omit<Isolator, "designation">> = fc
     deflection: fc.double({ min: 0.001, max: 0.06, noNaN: true }),
     air: fc.boolean(),
     damping: fc.oneof(
-      fc.record({ kind: fc.constant("viscous" as const), ratio: fc.double({ min: 0, max: 0.3, noNaN: true }) }),
-      fc.record({ kind: fc.constant("structural" as const), lossFactor: fc.double({ min: 0, max: 0.4, noNaN: true }) }),
+      fc.record({
+        kind: fc.constant("viscous" as const),
+        ratio: fc.double({ min: 0, max: 0.3, noNaN: true }),
+      }),
+      fc.record({
+        kind: fc.constant("structural" as const),
+        lossFactor: fc.double({ min: 0, max: 0.4, noNaN: true }),
+      }),
     ),
     dynamicRatio: fc.double({ min: 1, max: 2, noNaN: true }),
     price: fc.option(fc.integer({ min: 5, max: 500 })),
@@ -102,7 +116,9 @@ const arbitraryIsolator: fc.Arbitrary<Omit<Isolator, "designation">> = fc
 /** A small catalogue with designations of its own. */
 export const arbitraryCatalogue = fc
   .array(arbitraryIsolator, { minLength: 1, maxLength: 40 })
-  .map((list) => list.map((entry, i): Isolator => ({ ...entry, designation: `i${String(i).padStart(2, "0")}` })));
+  .map((list) =>
+    list.map((entry, i): Isolator => ({ ...entry, designation: `i${String(i).padStart(2, "0")}` })),
+  );
 
 export const arbitraryMachine = fc
   .record({

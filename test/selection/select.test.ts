@@ -3,7 +3,14 @@ import { describe, expect, test } from "vitest";
 import { columnsOf, type Isolator } from "../../src/isolator/index.ts";
 import type { Machine } from "../../src/machine/index.ts";
 import { select } from "../../src/selection/index.ts";
-import { arbitraryCatalogue, arbitraryMachine, isolator, machine, request } from "./arbitrary.ts";
+import {
+  arbitraryCatalogue,
+  arbitraryMachine,
+  isolator,
+  machine,
+  request,
+  uprightFeet,
+} from "./arbitrary.ts";
 
 const G = 9.80665;
 
@@ -20,7 +27,11 @@ function recomputedAt(mount: Isolator, { mass, footCount, speed }: Machine, orde
   const { axial, damping } = mount;
   const kappa = mount.dynamicRatio as number;
   const rate = (weight: number): number =>
-    axial.kind === "linear" ? kappa * axial.stiffness : axial.kind === "air" ? (weight * (2 * Math.PI * axial.naturalFrequencyHz) ** 2) / G : Number.NaN;
+    axial.kind === "linear"
+      ? kappa * axial.stiffness
+      : axial.kind === "air"
+        ? (weight * (2 * Math.PI * axial.naturalFrequencyHz) ** 2) / G
+        : Number.NaN;
   const k = rate(load);
   const omega = order * speed.max;
   const loss =
@@ -97,12 +108,21 @@ describe("a selection on feet known by number", () => {
 
   test("ranks in a total order that does not hang on the order of the catalogue", () => {
     fc.assert(
-      fc.property(arbitraryCatalogue, arbitraryMachine, fc.constantFrom("price", "stability", "margin", "transmitted_force", null), (list, on, rankBy) => {
-        const ask = request({ machine: on, rankBy: rankBy as "price" | null });
-        const names = (of: readonly Isolator[]): unknown =>
-          select(ask, columnsOf(of)).options.map((o) => [o.rank, o.arrangement[0]?.designation, o.unbeaten]);
-        expect(names([...list].reverse())).toEqual(names(list));
-      }),
+      fc.property(
+        arbitraryCatalogue,
+        arbitraryMachine,
+        fc.constantFrom("price", "stability", "margin", "transmitted_force", null),
+        (list, on, rankBy) => {
+          const ask = request({ machine: on, rankBy: rankBy as "price" | null });
+          const names = (of: readonly Isolator[]): unknown =>
+            select(ask, columnsOf(of)).options.map((o) => [
+              o.rank,
+              o.arrangement[0]?.designation,
+              o.unbeaten,
+            ]);
+          expect(names([...list].reverse())).toEqual(names(list));
+        },
+      ),
     );
   });
 
@@ -110,10 +130,18 @@ describe("a selection on feet known by number", () => {
     fc.assert(
       fc.property(arbitraryCatalogue, arbitraryMachine, (list, on) => {
         const { options } = select(request({ machine: on }), columnsOf(list));
-        const marks = options.map((o) => [o.price ?? Infinity, o.analysis.worst?.transmissibility as number, o.analysis.staticDeflection]);
+        const marks = options.map((o) => [
+          o.price ?? Infinity,
+          o.analysis.worst?.transmissibility as number,
+          o.analysis.staticDeflection,
+        ]);
         options.forEach((option, i) => {
           const mine = marks[i] as number[];
-          const beaten = marks.some((other) => other.every((v, j) => v <= (mine[j] as number)) && other.some((v, j) => v < (mine[j] as number)));
+          const beaten = marks.some(
+            (other) =>
+              other.every((v, j) => v <= (mine[j] as number)) &&
+              other.some((v, j) => v < (mine[j] as number)),
+          );
           expect(option.unbeaten).toBe(!beaten);
         });
       }),
@@ -136,8 +164,16 @@ describe("an isolator is rejected at its first gate", () => {
     ["mounting", { family: "spring_hanger" as const }, request()],
     ["mounting", {}, request({ mounting: "suspended" })],
     ["captive", {}, request({ environment: { ...environment, captive: true } })],
-    ["temperature", { temperature: { min: 263, max: 330 } }, request({ environment: { ...environment, temperature: { min: 250, max: 300 } } })],
-    ["exposure", { resists: ["oil" as const] }, request({ environment: { ...environment, exposures: ["ozone"] } })],
+    [
+      "temperature",
+      { temperature: { min: 263, max: 330 } },
+      request({ environment: { ...environment, temperature: { min: 250, max: 300 } } }),
+    ],
+    [
+      "exposure",
+      { resists: ["oil" as const] },
+      request({ environment: { ...environment, exposures: ["ozone"] } }),
+    ],
     ["free_height", {}, request({ limits: { ...limits, freeHeight: 0.1 } })],
     ["free_height", { freeHeight: null }, request({ limits: { ...limits, freeHeight: 1 } })],
     ["lead_time", {}, request({ limits: { ...limits, leadTimeDays: 5 } })],
@@ -147,20 +183,35 @@ describe("an isolator is rejected at its first gate", () => {
     ["underloaded", { load: { min: 2200, max: 2500, rated: 2500 } }, request()],
     ["overloaded", { load: { min: 500, max: 2000, rated: 2000 } }, request()],
     ["static_deflection", {}, request({ limits: { ...limits, staticDeflection: 0.02 } })],
-    ["transmissibility", {}, request({ target: { transmissibility: 0.01, isolationEfficiency: null, transmittedForce: null } })],
-    ["transmissibility", {}, request({ target: { transmissibility: null, isolationEfficiency: 0.99, transmittedForce: null } })],
+    [
+      "transmissibility",
+      {},
+      request({ target: { transmissibility: 0.01, isolationEfficiency: null, transmittedForce: null } }),
+    ],
+    [
+      "transmissibility",
+      {},
+      request({ target: { transmissibility: null, isolationEfficiency: 0.99, transmittedForce: null } }),
+    ],
     [
       "transmitted_force",
       {},
       request({
-        machine: machine({ excitations: [{ kind: "force", amplitude: 350, direction: [0, 0, 1], order: 1, phase: 0, at: null }] }),
+        machine: machine({
+          excitations: [
+            { kind: "force", amplitude: 350, direction: [0, 0, 1], order: 1, phase: 0, at: null },
+          ],
+        }),
         target: { transmissibility: 0.5, isolationEfficiency: null, transmittedForce: 1 },
       }),
     ],
     // 2084 N a foot on 3.2 MN/m is 19.6 Hz, at 1180 rpm = 19.7 Hz; damping of a half lets the target pass first.
     [
       "resonance",
-      { axial: { kind: "linear" as const, stiffness: 3.2e6 }, damping: { kind: "viscous" as const, ratio: 0.5 } },
+      {
+        axial: { kind: "linear" as const, stiffness: 3.2e6 },
+        damping: { kind: "viscous" as const, ratio: 0.5 },
+      },
       request({ target: { transmissibility: 2, isolationEfficiency: null, transmittedForce: null } }),
     ],
   ])("%s", (gate, mount, ask) => {
@@ -186,18 +237,21 @@ describe("near misses", () => {
   });
 
   test("leave out what failed two gates", () => {
-    const both = isolator({ axial: { kind: "linear", stiffness: 265e3 }, load: { min: 500, max: 2000, rated: 2000 } });
+    const both = isolator({
+      axial: { kind: "linear", stiffness: 265e3 },
+      load: { min: 500, max: 2000, rated: 2000 },
+    });
     expect(select(request(), columnsOf([both])).nearMisses).toEqual([]);
   });
 });
 
 describe("a selection on feet known by place", () => {
-  const feet = [
+  const feet = uprightFeet([
     [-0.6, -0.4, 0],
     [0.6, -0.4, 0],
     [-0.6, 0.4, 0],
     [0.6, 0.4, 0],
-  ] as const;
+  ]);
   const series = [1500, 2000, 2500, 3000, 4000].map((max) =>
     isolator({
       designation: `s${max}`,
@@ -208,7 +262,7 @@ describe("a selection on feet known by place", () => {
   );
 
   test("gives each foot a rating for its own load, within two ratings of one series", () => {
-    const on = machine({ feet, centreOfGravity: { x: 0.2, y: 0, z: null } });
+    const on = machine({ feet, centreOfGravity: { x: 0.2, y: 0 } });
     const { options } = select(request({ machine: on }), columnsOf(series));
     const level = options.reduce((a, b) => (b.analysis.levelness < a.analysis.levelness ? b : a));
     const [a, b, c, d] = level.arrangement as readonly Isolator[];
@@ -227,14 +281,18 @@ describe("a selection on feet known by place", () => {
   });
 
   test("mixes nothing when one rating an arrangement is asked for", () => {
-    const on = machine({ feet, centreOfGravity: { x: 0.2, y: 0, z: null } });
+    const on = machine({ feet, centreOfGravity: { x: 0.2, y: 0 } });
     const ask = request({ machine: on, limits: { ...request().limits, ratingsPerArrangement: 1 } });
-    for (const option of select(ask, columnsOf(series)).options) expect(new Set(option.arrangement).size).toBe(1);
+    for (const option of select(ask, columnsOf(series)).options)
+      expect(new Set(option.arrangement).size).toBe(1);
   });
 
   test("lifts no foot: with the weight near one corner the opposite one fails as uplift", () => {
-    const on = machine({ feet, centreOfGravity: { x: 0.5, y: 0.33, z: null } });
-    const { counts } = select(request({ machine: on }), columnsOf([isolator({ load: { min: 0, max: 1e5, rated: 1e5 } })]));
+    const on = machine({ feet, centreOfGravity: { x: 0.5, y: 0.33 } });
+    const { counts } = select(
+      request({ machine: on }),
+      columnsOf([isolator({ load: { min: 0, max: 1e5, rated: 1e5 } })]),
+    );
     expect([...counts.rejected]).toEqual([["uplift", 1]]);
   });
 });
