@@ -89,6 +89,8 @@ export type Route = Omit<RouteSpec<z.ZodObject, z.ZodObject, z.ZodType>, "handle
 };
 
 const nothing = z.strictObject({});
+/** Pages and health answer whatever query a proxy or a link has added. */
+const anything = z.looseObject({});
 
 /** Makes a route. The handler's parameter types follow from the operation's schemas. */
 export function route<
@@ -104,7 +106,10 @@ export function route<
       handler({
         context,
         params: readParameters(params ?? nothing, request.params) as z.output<PS>,
-        query: readParameters(query ?? nothing, queryOf(spec, request)) as z.output<QS>,
+        query: readParameters(
+          query ?? (spec.access === "open" ? anything : nothing),
+          queryOf(spec, request),
+        ) as z.output<QS>,
         body: (body === undefined ? undefined : readBody(body, request.body)) as z.output<BS>,
         request,
         response,
@@ -120,14 +125,20 @@ function queryOf(spec: { readonly keyInQuery?: true }, request: Request): Record
 }
 
 /** Every problem a route can answer with: its own, and those that follow from the parts of its request. */
-export function problemsOf({ operation, access }: Route): ReadonlySet<ProblemCode> {
-  const hasBody = operation.body !== undefined;
+export function problemsOf({
+  operation: { params, query, body, problems = [] },
+  access,
+}: Route): ReadonlySet<ProblemCode> {
+  const isOpen = access === "open";
+  const takesInput = !isOpen || params !== undefined || query !== undefined || body !== undefined;
   return new Set<ProblemCode>([
     "malformed-request",
-    ...(hasBody ? (["malformed-json", "payload-too-large", "unsupported-media-type"] as const) : []),
-    ...(access === "open" ? [] : (["unauthorized"] as const)),
-    "invalid-input",
-    ...(operation.problems ?? []),
+    ...(body === undefined
+      ? []
+      : (["malformed-json", "payload-too-large", "unsupported-media-type"] as const)),
+    ...(isOpen ? [] : (["unauthorized"] as const)),
+    ...(takesInput ? (["invalid-input"] as const) : []),
+    ...problems,
     "internal",
   ]);
 }

@@ -26,11 +26,9 @@ const extent = (description: string) => quantity("length", { above: 0, max: 1000
 export const feet = z
   .union([
     footCount.meta({ description: "How many feet, when their places are not known." }),
-    z
-      .strictObject({ count: footCount, length: extent("Along x."), width: extent("Along y.") })
-      .meta({
-        description: "A footprint: two rows along x; three feet stand two at the back and one in front.",
-      }),
+    z.strictObject({ count: footCount, length: extent("Along x."), width: extent("Along y.") }).meta({
+      description: "A footprint: two rows along x; three feet stand two at the back and one in front.",
+    }),
     z
       .strictObject({ positions: z.array(point).min(3).max(64) })
       .meta({ description: "The elastic centres of the isolators." }),

@@ -2,7 +2,7 @@ import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { footLoads } from "../../src/dynamics/index.ts";
 import { machine, uprightFeet } from "../selection/arbitrary.ts";
-import { expectClose } from "../support/expect-close.ts";
+import { expectAllClose, expectClose } from "../support/expect-close.ts";
 
 const W = 850 * 9.80665;
 const rectangle = [
@@ -30,7 +30,7 @@ describe("foot loads", () => {
     const expected = [-1, 1].flatMap((sy) =>
       [-1, 1].map((sx) => (W / 4) * (1 + (sx * 0.15) / 0.6 - (sy * 0.08) / 0.4)),
     );
-    loads.forEach((load, i) => expectClose(load, expected[i] as number, rounding));
+    expectAllClose(loads, expected, rounding);
   });
 
   test("on three feet balance forces and moments, whatever the springs", () => {
@@ -44,7 +44,7 @@ describe("foot loads", () => {
     // Moments about the line of the two rear feet, then about the x axis.
     expectClose(c, (W * 0.6) / 1.2, rounding);
     expectClose((b - a) * 0.3, W * 0.05, rounding);
-    footLoads(on, [1, 5, 20]).forEach((load, i) => expectClose(load, [a, b, c][i] as number, rounding));
+    expectAllClose(footLoads(on, [1, 5, 20]), [a, b, c], rounding);
   });
 
   test("balance the weight and its moments on any feet and springs", () => {

@@ -22,3 +22,13 @@ export function expectClose(
     true,
   );
 }
+
+/** `expectClose` for each value of two lists of equal length. */
+export function expectAllClose(
+  actual: readonly number[],
+  expected: readonly number[],
+  tolerance: Tolerance,
+): void {
+  expect(actual).toHaveLength(expected.length);
+  for (const [i, value] of actual.entries()) expectClose(value, expected[i] as number, tolerance);
+}
