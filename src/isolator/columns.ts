@@ -1,3 +1,4 @@
+import { dashpot, dynamicStiffness, lossFactor, ratedNaturalFrequency } from "./dynamic.ts";
 import type { Isolator } from "./isolator.ts";
 
 /**
@@ -21,4 +22,37 @@ export interface IsolatorColumns {
   readonly dashpot: Float64Array;
   /** Loss factor η; 0 for viscous damping. */
   readonly lossFactor: Float64Array;
+}
+
+/**
+ * The columns of a list of isolators. Where stiffness varies with load or frequency, its column holds the value at
+ * rated load and rated natural frequency.
+ */
+export function columnsOf(list: readonly Isolator[]): IsolatorColumns {
+  const isolators = [...list].sort(
+    (a, b) => a.load.max - b.load.max || (a.designation < b.designation ? -1 : 1),
+  );
+  const column = (value: (isolator: Isolator) => number): Float64Array => Float64Array.from(isolators, value);
+  const isAir = ({ axial }: Isolator): boolean => axial.kind === "air";
+  const ratedStiffness = (isolator: Isolator): number =>
+    dynamicStiffness(isolator, isolator.load.rated, ratedNaturalFrequency(isolator));
+  const minLoad = column((isolator) => isolator.load.min);
+  return {
+    isolators,
+    maxLoad: column((isolator) => isolator.load.max),
+    minLoad,
+    minLoadFrom: smallestFrom(minLoad),
+    stiffness: column((isolator) => (isAir(isolator) ? 0 : ratedStiffness(isolator))),
+    stiffnessPerLoad: column((isolator) => (isAir(isolator) ? ratedStiffness(isolator) / isolator.load.rated : 0)),
+    dashpot: column(dashpot),
+    lossFactor: column(lossFactor),
+  };
+}
+
+/** For each place the smallest value from there to the end. */
+function smallestFrom(values: Float64Array): Float64Array {
+  const smallest = values.slice();
+  for (let i = smallest.length - 2; i >= 0; i--)
+    smallest[i] = Math.min(smallest[i] as number, smallest[i + 1] as number);
+  return smallest;
 }

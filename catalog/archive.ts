@@ -1,0 +1,44 @@
+import type { Database } from "better-sqlite3";
+
+/** An answer as it went out. */
+export interface KeptAnswer {
+  readonly answer: string;
+  readonly catalog: string;
+  readonly revision: string;
+  /** ISO 8601 */
+  readonly createdAt: string;
+}
+
+export interface Archive {
+  /** Keeps an answer; one that is kept under the id already stays as it is. */
+  readonly put: (entry: { readonly id: string; readonly answer: string; readonly catalog: string; readonly revision: string }) => void;
+  readonly get: (id: string) => KeptAnswer | undefined;
+}
+
+/** Old answers are cleared away once in so many puts, so that a put stays cheap. */
+const CLEAR_EVERY = 64;
+
+/**
+ * The answers that were issued, on disk, at most `limit` of them (and the few that came since the last clearing),
+ * the oldest going first.
+ */
+export function openArchive(database: Database, limit: number, now: () => Date): Archive {
+  const insert = database.prepare(
+    "INSERT OR IGNORE INTO selections (id, created_at, catalog, revision, answer) VALUES (?, ?, ?, ?, ?)",
+  );
+  const select = database.prepare<[string], KeptAnswer>(
+    "SELECT answer, catalog, revision, created_at AS createdAt FROM selections WHERE id = ?",
+  );
+  // The newest `limit` stay: everything up to the one just before them goes.
+  const clear = database.prepare(
+    "DELETE FROM selections WHERE seq <= (SELECT seq FROM selections ORDER BY seq DESC LIMIT 1 OFFSET ?)",
+  );
+  let puts = 0;
+  return {
+    put({ id, answer, catalog, revision }) {
+      insert.run(id, now().toISOString(), catalog, revision, answer);
+      if (puts++ % CLEAR_EVERY === 0) clear.run(limit);
+    },
+    get: (id) => select.get(id),
+  };
+}
