@@ -8,10 +8,11 @@ import { closeGracefully } from "./shutdown.ts";
 
 async function start(config: Config): Promise<void> {
   const logger = pino({ level: config.logLevel }, pino.destination({ dest: 2, sync: true }));
-  const store = openStore(config.dataDir, { archiveLimit: config.archiveLimit });
+  const clock = () => new Date();
+  const store = openStore(config.dataDir, { archiveLimit: config.archiveLimit, now: clock });
   try {
     await store.ensureDemo();
-    const server = createServer(createApp({ store, config, logger, clock: () => new Date() }));
+    const server = createServer(createApp({ store, config, logger, clock }));
     await listen(server, config);
     greet(server.address() as AddressInfo);
     stopOnSignal(server, store, logger);

@@ -29,13 +29,14 @@ interface TestAppOptions {
 export async function testApp(options: TestAppOptions = {}): Promise<TestApp> {
   const folder = mkdtempSync(join(tmpdir(), "mountrank-"));
   const config = { ...readConfig({}), dataDir: folder, ...options.config };
-  const store = openStore(config.dataDir, { archiveLimit: config.archiveLimit });
+  const clock = () => new Date("2026-01-05T08:00:00Z");
+  const store = openStore(config.dataDir, { archiveLimit: config.archiveLimit, now: clock });
   await store.ensureDemo();
   const context: Context = {
     store,
     config,
     logger: pino({ level: "silent" }),
-    clock: () => new Date("2026-01-05T08:00:00Z"),
+    clock,
     engineVersion,
     ...options.context,
   };
