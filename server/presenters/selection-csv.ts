@@ -1,3 +1,4 @@
+import { PEOPLE_UNITS } from "../../src/units/index.ts";
 import type { CsvStyle } from "./csv.ts";
 import type { PresentedOption } from "./option.ts";
 import type { PresentedSelection } from "./selection.ts";
@@ -10,15 +11,15 @@ const COLUMNS: readonly Column<PresentedOption>[] = [
   { name: "family", of: (o) => o.family },
   { name: "quantity", of: (o) => o.quantity },
   { name: "items", of: (o) => o.items.map((item) => `${item.quantity} x ${item.isolator}`).join("; ") },
-  { name: "load_max", of: (o) => Math.max(...o.feet.map((foot) => foot.load_n)), unit: ["N", "lbf"] },
-  { name: "static_deflection", of: (o) => o.static_deflection_mm, unit: ["mm", "in"] },
-  { name: "levelness", of: (o) => o.levelness_mm, unit: ["mm", "in"] },
-  { name: "natural_frequency", of: (o) => o.natural_frequency_hz, unit: ["Hz", "Hz"] },
+  { name: "load_max", of: (o) => Math.max(...o.feet.map((foot) => foot.load_n)), unit: PEOPLE_UNITS.force },
+  { name: "static_deflection", of: (o) => o.static_deflection_mm, unit: PEOPLE_UNITS.short_length },
+  { name: "levelness", of: (o) => o.levelness_mm, unit: PEOPLE_UNITS.short_length },
+  { name: "natural_frequency", of: (o) => o.natural_frequency_hz, unit: PEOPLE_UNITS.frequency },
   { name: "frequency_ratio", of: (o) => o.frequency_ratio },
   { name: "damping_ratio", of: (o) => o.damping_ratio },
   { name: "transmissibility", of: (o) => o.transmissibility },
   { name: "isolation_efficiency_percent", of: (o) => o.isolation_efficiency_percent },
-  { name: "transmitted_force", of: (o) => o.transmitted_force_n, unit: ["N", "lbf"] },
+  { name: "transmitted_force", of: (o) => o.transmitted_force_n, unit: PEOPLE_UNITS.force },
   { name: "margin", of: (o) => o.margin },
   { name: "price", of: (o) => o.price },
   { name: "currency", of: (o) => o.currency },

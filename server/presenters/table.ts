@@ -9,9 +9,12 @@ export interface Column<Row> {
   /** Without its unit, which the header adds. */
   readonly name: string;
   readonly of: (row: Row) => Cell | undefined;
-  /** The unit of the value as JSON has it, which SI tables keep, and the one of US tables. */
-  readonly unit?: readonly [si: UnitSymbol, us: UnitSymbol];
+  /** The unit of each system; the value comes in the SI one, as JSON has it. */
+  readonly unit?: { readonly si: UnitSymbol; readonly us: UnitSymbol };
 }
+
+/** More digits than any reading has, and few enough to read. */
+const DIGITS = 8;
 
 /** Rows as CSV, in the units of a system, each header ending in the unit of its column. */
 export function tableCsv<Row>(
@@ -21,16 +24,19 @@ export function tableCsv<Row>(
   style: CsvStyle,
 ): string {
   const shown = columns.map(({ name, of, unit }) => {
-    if (unit === undefined) return { header: name, of: (row: Row): Cell => of(row) ?? null };
-    const [from, us] = unit;
-    const to = units === "us" ? us : from;
+    if (unit === undefined) return { header: name, of: (row: Row): Cell => rounded(of(row) ?? null) };
+    const to = unit[units];
     const convert = (value: Cell): Cell =>
-      typeof value === "number" && to !== from ? inUnit(ofUnit(value, from), to) : value;
-    return { header: `${name}_${unitSuffix(to)}`, of: (row: Row): Cell => convert(of(row) ?? null) };
+      typeof value === "number" && to !== unit.si ? inUnit(ofUnit(value, unit.si), to) : value;
+    return { header: `${name}_${unitSuffix(to)}`, of: (row: Row): Cell => rounded(convert(of(row) ?? null)) };
   });
   return csvOf(
     shown.map((column) => column.header),
     rows.map((row) => shown.map((column) => column.of(row))),
     style,
   );
+}
+
+function rounded(value: Cell): Cell {
+  return typeof value === "number" ? Number(value.toPrecision(DIGITS)) : value;
 }

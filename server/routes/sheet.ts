@@ -116,15 +116,7 @@ export const sheetRoutes: readonly Route[] = [
     },
     answerProblem: inTheCell,
     handler({ context, query, response }) {
-      const {
-        field,
-        rank,
-        format,
-        dec,
-        errors: _,
-        t: __,
-        ...machine
-      } = query as Machine & z.output<typeof SheetQuery>;
+      const { field, rank, format, dec, errors: _, t: __, ...machine } = query;
       const fields = field.split(",");
       if (fields.length > MOST_FIELDS) throw InputError.at("/field", `at most ${MOST_FIELDS} fields at once`);
       const values = valuesOf(context, dec === "," ? withPoints(machine) : machine, fields, rank ?? 1);

@@ -91,17 +91,18 @@ const KIND: Readonly<Record<string, string>> = {
 
 /** The query of a GET selection: all text; what it means is checked where the body is. */
 export const SelectionQuery = z.strictObject(
-  Object.fromEntries(
-    FIELDS.map(([name, { description, example }]) => [
-      name,
-      z
-        .string()
-        .max(200)
-        .optional()
-        .meta({ description, ...(example === undefined ? {} : { examples: [example] }) }),
-    ]),
-  ),
+  Object.fromEntries(FIELDS.map(([name, field]) => [name, textField(field)])) as {
+    [Name in keyof typeof QUERY]: ReturnType<typeof textField>;
+  },
 );
+
+function textField({ description, example }: QueryField) {
+  return z
+    .string()
+    .max(200)
+    .optional()
+    .meta({ description, ...(example === undefined ? {} : { examples: [example] }) });
+}
 
 type Nested = { [key: string]: Nested | unknown };
 
@@ -142,9 +143,9 @@ function footprint(query: Readonly<Record<string, string | undefined>>): boolean
 }
 
 function requireCompatible(query: Readonly<Record<string, string | undefined>>): void {
-  const refuse = (name: string, other: string): void => {
+  const refuse = (name: keyof typeof QUERY, other: string): void => {
     if (query[name] !== undefined && query[other] !== undefined)
-      throw InputError.at(`/${to(name)}`, `${name} cannot stand beside ${other}`);
+      throw InputError.at(`/${QUERY[name].to.join("/")}`, `cannot stand beside ${other}`);
   };
   refuse("speed", "speed_min");
   refuse("speed", "speed_max");

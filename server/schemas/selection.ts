@@ -10,7 +10,10 @@ const currency = z
   .regex(/^[A-Z]{3}$/, { error: 'an ISO 4217 code of three capitals, such as "EUR"' });
 
 const environment = z.strictObject({
-  temperature: z.strictObject({ min: temperature, max: temperature }).optional(),
+  temperature: z
+    .strictObject({ min: temperature.optional(), max: temperature.optional() })
+    .optional()
+    .meta({ description: "The site's range; one of the two alone is a site of that temperature." }),
   exposures: z.array(z.enum(EXPOSURES)).max(EXPOSURES.length).optional(),
   captive: z.boolean().optional().meta({ description: "Whether every isolator must be captive." }),
 });

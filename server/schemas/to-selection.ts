@@ -29,9 +29,6 @@ export function understand(body: SelectionBody): AskedSelection {
       "/target/transmitted_force",
       "cannot be judged without an excitation; state what shakes the machine",
     );
-  const { temperature } = environment;
-  if (temperature && temperature.max < temperature.min)
-    throw InputError.at("/environment/temperature/max", "is below the minimum");
   const optional = <T>(value: T | undefined): T | null => value ?? null;
   const metres = (value: number | undefined): number | null =>
     value === undefined ? null : toSI(value, "length");
@@ -42,9 +39,7 @@ export function understand(body: SelectionBody): AskedSelection {
       machine: toMachine(normalised),
       mounting: normalised.mounting,
       environment: {
-        temperature: temperature
-          ? { min: toSI(temperature.min, "temperature"), max: toSI(temperature.max, "temperature") }
-          : null,
+        temperature: temperatureOf(environment.temperature),
         exposures: environment.exposures ?? [],
         captive: environment.captive ?? false,
       },
@@ -68,6 +63,14 @@ export function understand(body: SelectionBody): AskedSelection {
       rankBy: optional(body.rank_by),
     },
   };
+}
+
+function temperatureOf(site: { min?: number | undefined; max?: number | undefined } | undefined) {
+  const min = site?.min ?? site?.max;
+  const max = site?.max ?? site?.min;
+  if (min === undefined || max === undefined) return null;
+  if (max < min) throw InputError.at("/environment/temperature/max", "is below the minimum");
+  return { min: toSI(min, "temperature"), max: toSI(max, "temperature") };
 }
 
 function normalise(body: SelectionBody) {

@@ -1,0 +1,485 @@
+import { afterAll, beforeAll, describe, expect, test } from "vitest";
+import { BOOK_SPRINGS } from "../references/books.ts";
+import { DEFLECTION_NEEDED_MM } from "../references/transmissibility.ts";
+import { expectClose } from "../support/expect-close.ts";
+import { request } from "../support/request.ts";
+import { testApp } from "../support/test-app.ts";
+
+let service: Awaited<ReturnType<typeof testApp>>;
+let api: ReturnType<typeof request>;
+
+beforeAll(async () => {
+  service = await testApp();
+  service.context.store.importRevision("books", BOOK_SPRINGS, { activate: true });
+  api = request(service.app);
+});
+afterAll(() => service.close());
+
+const SMALLEST = { mass: "850 kg", speed: "1180 rpm", target: { transmissibility: 0.08 } };
+
+async function select(body: object) {
+  const response = await api.post("/v1/selections").send(body);
+  expect(response.status, JSON.stringify(response.body.errors)).toBe(200);
+  return response.body;
+}
+
+describe("the smallest selection", () => {
+  test("ranks isolators that hold the target, the cheapest first", async () => {
+    const { options, counts, ranked_by } = await select(SMALLEST);
+    expect(counts.passing).toBeGreaterThan(3);
+    expect(ranked_by).toBe("price");
+    for (const [i, option] of options.entries()) {
+      expect(option.rank).toBe(i + 1);
+      expect(option.transmissibility).toBeLessThanOrEqual(0.08);
+      expect(option.quantity).toBe(4);
+      expect(option.price).toBeGreaterThanOrEqual(options[i - 1]?.price ?? 0);
+      expectClose(option.margin, 0.08 / option.transmissibility, { rtol: 1e-12, because: "definition" });
+      // fn = 15.76/√(d mm) holds for steel springs; dynamic stiffening only raises it (handbook approximation).
+      expect(option.natural_frequency_hz).toBeGreaterThan(
+        (15.76 / Math.sqrt(option.static_deflection_mm)) * 0.999,
+      );
+    }
+  });
+
+  test("says what an undamped isolator would have to be: r = √(1 + 1/T), d = g/ωn²", async () => {
+    const { needed } = await select(SMALLEST);
+    expectClose(needed.frequency_ratio, Math.sqrt(13.5), { rtol: 1e-14, because: "closed form" });
+    expectClose(needed.natural_frequency_hz, 1180 / 60 / Math.sqrt(13.5), {
+      rtol: 1e-14,
+      because: "closed form",
+    });
+    expectClose(needed.static_deflection_mm, 8.67, { atol: 0.005, because: "rounded to the hundredth" });
+  });
+
+  test("tells its assumptions and its cautions", async () => {
+    const { assumptions, cautions } = await select(SMALLEST);
+    expect(assumptions).toContain("4 feet.");
+    expect(cautions.join(" ")).toContain("licensed engineer");
+  });
+
+  test("assumes a target where none is given, and says so", async () => {
+    const { request: asked, assumptions } = await select({ mass: 850, speed: 1180 });
+    expect(asked.target.transmissibility).toBe(0.1);
+    expect(assumptions).toContain("Target: transmissibility at most 0.1.");
+  });
+});
+
+describe("published examples through HTTP", () => {
+  for (const [rpm, ...row] of DEFLECTION_NEEDED_MM)
+    test(`static deflection that an undamped mount needs at ${rpm} rpm, for four efficiencies (handbook table)`, async () => {
+      for (const [i, efficiency] of [80, 90, 95, 98].entries()) {
+        const { needed } = await select({
+          mass: 100,
+          speed: rpm,
+          target: { isolation_efficiency: efficiency },
+        });
+        expectClose(needed.static_deflection_mm, row[i] as number, {
+          atol: 0.0051,
+          because: "printed to the hundredth",
+        });
+      }
+    });
+
+  test("Rao, Mechanical Vibrations, exhaust fan: 40 kg at 1000 rpm, 10 % on four springs (recalled, recomputed)", async () => {
+    const { needed } = await select({ mass: "40 kg", speed: "1000 rpm", target: { transmissibility: 0.1 } });
+    expectClose(needed.frequency_ratio, 3.3166, { atol: 5e-5, because: "printed to four decimals" });
+    const k = (40 * (2 * Math.PI * needed.natural_frequency_hz) ** 2) / 4;
+    expectClose(k, 9969.3, { atol: 0.05, because: "printed to the tenth" });
+  });
+
+  test("Rao, Mechanical Vibrations, turntable: 1 kg, 3 Hz, 80 % reduction (recalled, recomputed)", async () => {
+    const { needed } = await select({
+      mass: "1 kg",
+      speed: "3 Hz",
+      feet: 3,
+      target: { isolation_efficiency: 80 },
+    });
+    expectClose(needed.frequency_ratio, 2.4495, { atol: 5e-5, because: "printed to four decimals" });
+    expectClose(2 * Math.PI * needed.natural_frequency_hz, 7.6953, {
+      atol: 5e-5,
+      because: "printed to four decimals",
+    });
+  });
+
+  test("Thomson, Theory of Vibration, isolation: 100 kg, 350 N at 3000 rpm gives T 0.137 and 47.9 N (recalled, recomputed)", async () => {
+    const { options } = await select({
+      catalog: "books",
+      mass: "100 kg",
+      speed: "3000 rpm",
+      excitation: [{ kind: "force", amplitude: "350 N" }],
+      target: { transmissibility: 0.2 },
+    });
+    const option = options.find((o: { designation: string }) => o.designation === "thomson");
+    expectClose(option.transmissibility, 0.136851, { atol: 5e-7, because: "printed to six decimals" });
+    expectClose(option.transmitted_force_n, 47.898, { atol: 5e-4, because: "printed to three decimals" });
+    expectClose(option.static_deflection_mm, 1.401, { atol: 5e-4, because: "printed to three decimals" });
+    expectClose(option.natural_frequency_hz, 13.32, { atol: 0.005, because: "printed to the hundredth" });
+  });
+
+  test("Grover, Mechanical Vibrations, ex. 4.10.2: reciprocating 2 kg on 75 kg at 3000 rpm transmits 2075.84 N", async () => {
+    const { options } = await select({
+      catalog: "books",
+      mass: "75 kg",
+      speed: "3000 rpm",
+      feet: 3,
+      excitation: [{ kind: "unbalance", moment: "0.08 kg m" }],
+      target: { transmissibility: 0.5 },
+    });
+    const option = options.find((o: { designation: string }) => o.designation === "grover");
+    expectClose(option.transmitted_force_n, 2075.84, { atol: 0.005, because: "printed to the hundredth" });
+    expectClose(option.frequency_ratio, 2.50886, { atol: 5e-6, because: "printed to five decimals" });
+  });
+
+  test("Grover, Mechanical Vibrations, ex. 4.10.1 (b): 490 N at 180 rpm on 1000 kg transmits 186.63 N", async () => {
+    const { options } = await select({
+      catalog: "books",
+      mass: "1000 kg",
+      speed: "180 rpm",
+      excitation: [{ kind: "force", amplitude: "490 N" }],
+      target: { transmitted_force: "200 N" },
+    });
+    expect(options).toHaveLength(1);
+    expectClose(options[0].transmitted_force_n, 186.63, {
+      atol: 0.05,
+      because: "the book rounds on the way",
+    });
+  });
+});
+
+describe("the request as understood", () => {
+  const FULL = {
+    name: "Prover extract fan",
+    mass: "1874 lb",
+    speed: { min: "9.8333 Hz", max: "1180 rpm" },
+    feet: { count: 4, length: "70 in", width: "1.1 m" },
+    centre_of_gravity: { x: "100 mm", y: 0 },
+    excitation: [{ kind: "unbalance", rotor_mass: "120 kg", grade: "G6.3" }],
+    environment: { temperature: { min: "14 degF", max: "45 degC" }, exposures: ["oil"] },
+    target: { isolation_efficiency: 80, transmitted_force: "22 lbf" },
+    limits: { static_deflection: "2 in", currency: "EUR", price: 900 },
+    rank_by: "margin",
+    limit: 3,
+  };
+
+  test("is plain numbers in the documented units, and posted again asks the same", async () => {
+    const first = await select(FULL);
+    expect(typeof first.request.mass).toBe("number");
+    expect(typeof first.request.environment.temperature.min).toBe("number");
+    const again = await select(first.request);
+    expect(again.id).toBe(first.id);
+    expect(again).toEqual(first);
+  });
+
+  test("asks the same however its keys are ordered", async () => {
+    const turned = Object.fromEntries(Object.entries(FULL).reverse());
+    expect((await select(turned)).id).toBe((await select(FULL)).id);
+  });
+
+  test("gives the same numbers in any units", async () => {
+    const metric = await select({ mass: "850 kg", speed: "1180 rpm", target: { transmissibility: 0.08 } });
+    const mixed = await select({
+      mass: `${850 / 0.45359237} lb`,
+      speed: `${1180 / 60} Hz`,
+      target: { isolation_efficiency: 92 },
+    });
+    expect(mixed.options.map((o: { designation: string }) => o.designation)).toEqual(
+      metric.options.map((o: { designation: string }) => o.designation),
+    );
+    expectClose(mixed.options[0].transmissibility, metric.options[0].transmissibility, {
+      rtol: 1e-12,
+      because: "rounding of the conversion",
+    });
+  });
+});
+
+describe("an answer as issued", () => {
+  test("comes back byte for byte under its id", async () => {
+    const issued = await api.post("/v1/selections").send(SMALLEST);
+    const kept = await api.get(`/v1/selections/${issued.body.id}`);
+    expect(kept.text).toBe(issued.text);
+  });
+
+  test("comes as CSV with .csv after the id, in SI and US units", async () => {
+    const { id, options } = await select(SMALLEST);
+    const csv = await api.get(`/v1/selections/${id}.csv`);
+    expect(csv.headers["content-type"]).toBe("text/csv; charset=utf-8");
+    const lines = csv.text.split("\r\n");
+    expect(lines[0]).toContain("static_deflection_mm");
+    expect(lines).toHaveLength(options.length + 2);
+    const us = await api.get(`/v1/selections/${id}.csv?units=us`);
+    const column = us.text.split("\r\n")[0]?.split(",").indexOf("static_deflection_in") as number;
+    const inches = Number(us.text.split("\r\n")[1]?.split(",")[column]);
+    expectClose(inches * 25.4, options[0].static_deflection_mm, {
+      rtol: 1e-7,
+      because: "eight digits in a CSV",
+    });
+  });
+
+  test("is 404 under an id that was never issued", async () => {
+    for (const id of ["0123456789abcdef01234567", "nonsense", "%2e%2e", "x.csv"])
+      expect((await api.get(`/v1/selections/${id}`)).status).toBe(404);
+  });
+});
+
+describe("pages", () => {
+  const PAGED = { ...SMALLEST, limit: 4 };
+
+  test("follow one another without gap or repetition", async () => {
+    const whole = await select({ ...SMALLEST, limit: 100 });
+    const found: string[] = [];
+    let cursor: string | null = null;
+    do {
+      const page = await select({ ...PAGED, cursor });
+      found.push(...page.options.map((o: { designation: string }) => o.designation));
+      cursor = page.next_cursor;
+    } while (cursor !== null && found.length < 200);
+    expect(found.slice(0, 100)).toEqual(whole.options.map((o: { designation: string }) => o.designation));
+  });
+
+  test("refuse the cursor of another question as stale, and what is no cursor as invalid", async () => {
+    const { next_cursor } = await select(PAGED);
+    const stale = await api.post("/v1/selections").send({ ...PAGED, mass: "851 kg", cursor: next_cursor });
+    expect(stale.status).toBe(410);
+    expect(stale.body.code).toBe("stale-cursor");
+    const invalid = await api.post("/v1/selections").send({ ...PAGED, cursor: "page2" });
+    expect(invalid.status).toBe(422);
+    expect(invalid.body.errors[0].pointer).toBe("/cursor");
+  });
+
+  test("refuse a cursor once the catalogue has a new revision", async () => {
+    const ask = { ...PAGED, catalog: "moving", mass: 100 };
+    const list = Array.from({ length: 9 }, (_, i) => ({
+      ...(BOOK_SPRINGS[0] as object),
+      designation: `s${i}`,
+      load_n: { max: 3000 },
+    }));
+    service.context.store.importRevision("moving", list as typeof BOOK_SPRINGS, { activate: true });
+    const { next_cursor } = await select({ ...ask, speed: 3000, target: { transmissibility: 0.5 } });
+    service.context.store.importRevision("moving", list.slice(1) as typeof BOOK_SPRINGS, { activate: true });
+    const stale = await api
+      .post("/v1/selections")
+      .send({ ...ask, speed: 3000, target: { transmissibility: 0.5 }, cursor: next_cursor });
+    expect(stale.status).toBe(410);
+  });
+});
+
+describe("a GET selection", () => {
+  const QUERY = "mass=850kg&speed=1180rpm&feet=4&transmissibility=0.08";
+
+  test("answers as the POST does", async () => {
+    const got = await api.get(`/v1/selections?${QUERY}`);
+    const posted = await select({ ...SMALLEST, feet: 4 });
+    expect(got.body).toEqual(posted);
+  });
+
+  test("reads every query name", async () => {
+    const response = await api.get(
+      "/v1/selections?name=F&tag=1&mass=850&speed_min=600&speed_max=1180&feet=4&length=1.8m&width=1100mm&cg_x=0.1m&cg_y=0" +
+        "&rotor_mass=120kg&grade=G6.3&efficiency=80&max_force=200N&families=open_spring,housed_spring&max_price=2000&max_height=300mm" +
+        "&captive=false&temp_min=-10&temp_max=45degC&rank_by=stability&mounting=floor&catalog=demo&limit=2",
+    );
+    expect(response.status, response.text).toBe(200);
+    expect(response.body.request).toMatchObject({
+      speed: { min: 600, max: 1180 },
+      feet: { count: 4, length: 1.8, width: 1.1 },
+      centre_of_gravity: { x: 0.1, y: 0 },
+      excitation: [{ kind: "unbalance", rotor_mass: 120, grade: "G6.3" }],
+      target: { isolation_efficiency: 80, transmitted_force: 200 },
+      limits: { families: ["open_spring", "housed_spring"], price: 2000, free_height: 0.3 },
+      environment: { captive: false, temperature: { min: -10, max: 45 } },
+      rank_by: "stability",
+      limit: 2,
+    });
+  });
+
+  test("is not sent again while nothing has changed", async () => {
+    const first = await api.get(`/v1/selections?${QUERY}`);
+    const etag = first.headers["etag"] as string;
+    expect(etag).toMatch(/^"/);
+    const second = await api.get(`/v1/selections?${QUERY}`).set("if-none-match", etag);
+    expect(second.status).toBe(304);
+  });
+
+  test("names the query's own parameter in its faults", async () => {
+    const { body, status } = await api.get("/v1/selections?mass=850kg&speed=1180kg&temp_max=hot");
+    expect(status).toBe(422);
+    expect(body.errors.map((e: { parameter: string }) => e.parameter)).toEqual(["speed", "temp_max"]);
+  });
+
+  test("comes as CSV by format= or by Accept, with a decimal comma when asked", async () => {
+    const byFormat = await api.get(`/v1/selections?${QUERY}&format=csv`);
+    const byAccept = await api.get(`/v1/selections?${QUERY}`).set("accept", "text/csv");
+    expect(byAccept.text).toBe(byFormat.text);
+    const comma = await api.get(`/v1/selections?${QUERY}&format=csv&decimal=comma`);
+    expect(comma.text.split("\r\n")[1]).toMatch(/;0,0\d+;/);
+    expect((await api.get(`/v1/selections?${QUERY}`).set("accept", "image/png")).status).toBe(406);
+  });
+});
+
+describe("bad input", () => {
+  test.each<[string, object, string]>([
+    ["no mass", { speed: 1180 }, "/mass"],
+    ["no speed", { mass: 850 }, "/speed"],
+    ["mass of nothing", { ...SMALLEST, mass: 0 }, "/mass"],
+    ["negative mass", { ...SMALLEST, mass: "-3 kg" }, "/mass"],
+    ["absurd mass", { ...SMALLEST, mass: "1e9 kg" }, "/mass"],
+    ["mass with a speed's unit", { ...SMALLEST, mass: "850 rpm" }, "/mass"],
+    ["unknown unit", { ...SMALLEST, mass: "850 stone" }, "/mass"],
+    ["infinite mass", { ...SMALLEST, mass: "1e999 kg" }, "/mass"],
+    ["a comma in a number", { ...SMALLEST, mass: "1,874 lb" }, "/mass"],
+    ["a boolean mass", { ...SMALLEST, mass: true }, "/mass"],
+    ["a list of masses", { ...SMALLEST, mass: [850] }, "/mass"],
+    ["too slow", { ...SMALLEST, speed: 0.5 }, "/speed"],
+    ["a range upside down", { ...SMALLEST, speed: { min: 1200, max: 600 } }, "/speed/max"],
+    ["a range of one speed", { ...SMALLEST, speed: { min: 600, max: 600 } }, "/speed/max"],
+    ["half a range", { ...SMALLEST, speed: { min: 600 } }, "/speed/max"],
+    ["two feet", { ...SMALLEST, feet: 2 }, "/feet"],
+    ["sixty-five feet", { ...SMALLEST, feet: 65 }, "/feet"],
+    ["half a foot", { ...SMALLEST, feet: 4.5 }, "/feet"],
+    ["an odd footprint", { ...SMALLEST, feet: { count: 5, length: 1, width: 1 } }, "/feet/count"],
+    [
+      "feet on one line",
+      { ...SMALLEST, feet: { positions: [0, 1, 2].map((x) => ({ x, y: x })) } },
+      "/feet/positions",
+    ],
+    [
+      "a centre of gravity outside the feet",
+      { ...SMALLEST, feet: { count: 4, length: 1, width: 1 }, centre_of_gravity: { x: 0.6, y: 0 } },
+      "/centre_of_gravity",
+    ],
+    [
+      "a centre of gravity over unplaced feet",
+      { ...SMALLEST, centre_of_gravity: { x: 0.6, y: 0 } },
+      "/centre_of_gravity",
+    ],
+    ["order nothing", { ...SMALLEST, orders: [0] }, "/orders/0"],
+    ["an order beyond 200", { ...SMALLEST, orders: [201] }, "/orders/0"],
+    ["no orders", { ...SMALLEST, orders: [] }, "/orders"],
+    ["an unknown excitation", { ...SMALLEST, excitation: [{ kind: "shaking" }] }, "/excitation/0/kind"],
+    [
+      "a direction to nowhere",
+      { ...SMALLEST, excitation: [{ kind: "force", amplitude: 1, direction: [0, 0, 0] }] },
+      "/excitation/0/direction",
+    ],
+    [
+      "no such grade",
+      { ...SMALLEST, excitation: [{ kind: "unbalance", rotor_mass: 10, grade: "G7" }] },
+      "/excitation/0/grade",
+    ],
+    [
+      "an unbalance of nothing",
+      { ...SMALLEST, excitation: [{ kind: "unbalance", moment: 0 }] },
+      "/excitation/0/moment",
+    ],
+    ["a target of nothing", { ...SMALLEST, target: { transmissibility: 0 } }, "/target/transmissibility"],
+    [
+      "a complete efficiency",
+      { ...SMALLEST, target: { isolation_efficiency: 100 } },
+      "/target/isolation_efficiency",
+    ],
+    [
+      "a force target without an excitation",
+      { ...SMALLEST, target: { transmitted_force: 10 } },
+      "/target/transmitted_force",
+    ],
+    ["no such family", { ...SMALLEST, limits: { families: ["open_sprung"] } }, "/limits/families/0"],
+    ["a currency in words", { ...SMALLEST, limits: { currency: "euro" } }, "/limits/currency"],
+    ["no such exposure", { ...SMALLEST, environment: { exposures: ["lava"] } }, "/environment/exposures/0"],
+    [
+      "temperatures upside down",
+      { ...SMALLEST, environment: { temperature: { min: 40, max: 20 } } },
+      "/environment/temperature/max",
+    ],
+    ["no such ranking", { ...SMALLEST, rank_by: "colour" }, "/rank_by"],
+    ["no such catalogue", { ...SMALLEST, catalog: "atlantis" }, "/catalog"],
+    ["a page of nothing", { ...SMALLEST, limit: 0 }, "/limit"],
+    ["an unknown field", { ...SMALLEST, masss: 3 }, "/masss"],
+    ["an unknown field within", { ...SMALLEST, target: { transmisibility: 0.1 } }, "/target/transmisibility"],
+  ])("%s is refused, by its place", async (_, body, pointer) => {
+    const response = await api.post("/v1/selections").send(body);
+    expect(response.status).toBe(422);
+    expect(response.type).toBe("application/problem+json");
+    expect(response.body.errors.map((e: { pointer: string }) => e.pointer)).toContain(pointer);
+  });
+
+  test("suggests the field that was meant", async () => {
+    const { body } = await api.post("/v1/selections").send({ ...SMALLEST, target: { transmisibility: 0.1 } });
+    expect(body.errors[0].detail).toContain('did you mean "transmissibility"?');
+  });
+
+  test.each([
+    ["uncertainty", { ...SMALLEST, uncertainty: { mass: 0.05 } }, "/uncertainty"],
+    ["floor_motion", { ...SMALLEST, floor_motion: {} }, "/floor_motion"],
+    ["run_up", { ...SMALLEST, run_up: { time: 8 } }, "/run_up"],
+    ["support_velocity", { ...SMALLEST, target: { support_velocity: 1 } }, "/target/support_velocity"],
+    ["probability", { ...SMALLEST, rank_by: "probability" }, "/rank_by"],
+  ])("%s is refused by name as not yet supported", async (_, body, pointer) => {
+    const response = await api.post("/v1/selections").send(body);
+    expect(response.status).toBe(422);
+    expect(response.body.errors).toEqual([
+      expect.objectContaining({ pointer, detail: expect.stringContaining("not yet supported") }),
+    ]);
+  });
+
+  test("leaves the service serving", async () => {
+    await api.post("/v1/selections").set("content-type", "application/json").send("{broken");
+    expect((await select(SMALLEST)).options.length).toBeGreaterThan(0);
+  });
+});
+
+describe("excitation", () => {
+  test("adds forces of one order as phasors", async () => {
+    const ask = (phase_deg: number) =>
+      select({
+        ...SMALLEST,
+        excitation: [
+          { kind: "force", amplitude: "100 N" },
+          { kind: "force", amplitude: "100 N", phase_deg },
+        ],
+      });
+    const together = (await ask(0)).options[0];
+    const apart = (await ask(90)).options[0];
+    expectClose(together.transmitted_force_n, 200 * together.transmissibility, {
+      rtol: 1e-12,
+      because: "in phase",
+    });
+    expectClose(apart.transmitted_force_n, 100 * Math.SQRT2 * apart.transmissibility, {
+      rtol: 1e-12,
+      because: "a right angle",
+    });
+  });
+
+  test("of a grade is what it permits at the top speed: 100 kg at G 6.3 and 1500 rpm shakes with 98.960 N (ISO 21940-11)", async () => {
+    const { options } = await select({
+      mass: 850,
+      speed: 1500,
+      excitation: [{ kind: "unbalance", rotor_mass: "100 kg", grade: "G 6.3" }],
+      target: { transmissibility: 0.08 },
+    });
+    expectClose(options[0].transmitted_force_n / options[0].transmissibility, 98.96, {
+      atol: 5e-4,
+      because: "printed to three decimals",
+    });
+  });
+
+  test("across a speed range is judged where it is worst, which may be a resonance inside", async () => {
+    const { options, cautions } = await select({
+      ...SMALLEST,
+      speed: { min: 60, max: 1180 },
+      target: { transmissibility: 200 },
+    });
+    expect(options[0].worst_speed_rpm).toBeGreaterThan(61);
+    expect(options[0].worst_speed_rpm).toBeLessThan(1179);
+    expect(options[0].notes.join(" ")).toContain("lies inside the speed range");
+    expect(cautions.join(" ")).toContain("speed range");
+  });
+
+  test("without a vertical part gives null with its reason, and passes nothing", async () => {
+    const { options, counts } = await select({
+      ...SMALLEST,
+      excitation: [{ kind: "force", amplitude: 100, direction: [1, 0, 0] }],
+    });
+    expect(options).toEqual([]);
+    expect(counts.rejected.transmissibility).toBeGreaterThan(0);
+  });
+});
