@@ -11,7 +11,12 @@ export interface KeptAnswer {
 
 export interface Archive {
   /** Keeps an answer; one that is kept under the id already stays as it is. */
-  readonly put: (entry: { readonly id: string; readonly answer: string; readonly catalog: string; readonly revision: string }) => void;
+  readonly put: (entry: {
+    readonly id: string;
+    readonly answer: string;
+    readonly catalog: string;
+    readonly revision: string;
+  }) => void;
   readonly get: (id: string) => KeptAnswer | undefined;
 }
 

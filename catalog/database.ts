@@ -38,7 +38,11 @@ function makeFolder(dataDir: string): void {
   try {
     mkdirSync(dataDir, { recursive: true });
   } catch (error) {
-    throw new CatalogError("unusable_folder", `cannot make the data folder ${dataDir}: ${reason(error)}`, error);
+    throw new CatalogError(
+      "unusable_folder",
+      `cannot make the data folder ${dataDir}: ${reason(error)}`,
+      error,
+    );
   }
 }
 
@@ -58,7 +62,10 @@ function requireOurs(path: string): void {
   if (header.length < HEADER_BYTES || header.toString("latin1", 0, MAGIC.length) !== MAGIC)
     throw new CatalogError("damaged_data", `${path} is not a database; move it away or set MOUNTRANK_DATA`);
   if (header.readUInt32BE(APPLICATION_ID_AT) !== APPLICATION_ID)
-    throw new CatalogError("foreign_data", `${path} belongs to another program; set MOUNTRANK_DATA to another folder`);
+    throw new CatalogError(
+      "foreign_data",
+      `${path} belongs to another program; set MOUNTRANK_DATA to another folder`,
+    );
   requireKnownVersion(path, header.readUInt32BE(USER_VERSION_AT));
 }
 

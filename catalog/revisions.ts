@@ -1,6 +1,11 @@
 import { createHash } from "node:crypto";
 import type { Database } from "better-sqlite3";
-import { columnsOf, type IsolatorColumns, type IsolatorRecord, isolatorFromRecord } from "../src/isolator/index.ts";
+import {
+  columnsOf,
+  type IsolatorColumns,
+  type IsolatorRecord,
+  isolatorFromRecord,
+} from "../src/isolator/index.ts";
 import { CatalogError } from "./errors.ts";
 
 /** One immutable revision of a catalogue, in memory as the columns that screening reads. */
@@ -34,7 +39,11 @@ export function revisionId(records: readonly IsolatorRecord[]): string {
 }
 
 export interface Revisions {
-  readonly importRevision: (catalog: string, records: readonly IsolatorRecord[], options: ImportOptions) => Imported;
+  readonly importRevision: (
+    catalog: string,
+    records: readonly IsolatorRecord[],
+    options: ImportOptions,
+  ) => Imported;
   readonly snapshot: (catalog: string) => Snapshot;
   readonly record: (revision: string, designation: string) => IsolatorRecord | undefined;
   readonly records: (revision: string, designations: readonly string[]) => readonly IsolatorRecord[];
@@ -44,10 +53,16 @@ export interface Revisions {
 /** The catalogues in a database: named lists of immutable revisions, one of them active. */
 export function openRevisions(database: Database, now: () => Date): Revisions {
   const hasRevision = database.prepare<[string], 1>("SELECT 1 FROM revisions WHERE id = ?").pluck();
-  const addRevision = database.prepare("INSERT INTO revisions (id, created_at, count, note) VALUES (?, ?, ?, ?)");
-  const addIsolator = database.prepare("INSERT INTO isolators (revision, designation, record) VALUES (?, ?, ?)");
+  const addRevision = database.prepare(
+    "INSERT INTO revisions (id, created_at, count, note) VALUES (?, ?, ?, ?)",
+  );
+  const addIsolator = database.prepare(
+    "INSERT INTO isolators (revision, designation, record) VALUES (?, ?, ?)",
+  );
   const addCatalog = database.prepare("INSERT OR IGNORE INTO catalogs (name) VALUES (?)");
-  const addToCatalog = database.prepare("INSERT OR IGNORE INTO catalog_revisions (catalog, revision) VALUES (?, ?)");
+  const addToCatalog = database.prepare(
+    "INSERT OR IGNORE INTO catalog_revisions (catalog, revision) VALUES (?, ?)",
+  );
   const activate = database.prepare("UPDATE catalogs SET active_revision = ? WHERE name = ?");
   const active = database
     .prepare<[string], string | null>("SELECT active_revision FROM catalogs WHERE name = ?")
@@ -55,7 +70,9 @@ export function openRevisions(database: Database, now: () => Date): Revisions {
   const recordOf = database
     .prepare<[string, string], string>("SELECT record FROM isolators WHERE revision = ? AND designation = ?")
     .pluck();
-  const recordsOf = database.prepare<[string], string>("SELECT record FROM isolators WHERE revision = ?").pluck();
+  const recordsOf = database
+    .prepare<[string], string>("SELECT record FROM isolators WHERE revision = ?")
+    .pluck();
 
   const importAll = database.transaction(
     (catalog: string, records: readonly IsolatorRecord[], options: ImportOptions): Imported => {

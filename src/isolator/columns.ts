@@ -43,7 +43,9 @@ export function columnsOf(list: readonly Isolator[]): IsolatorColumns {
     minLoad,
     minLoadFrom: smallestFrom(minLoad),
     stiffness: column((isolator) => (isAir(isolator) ? 0 : ratedStiffness(isolator))),
-    stiffnessPerLoad: column((isolator) => (isAir(isolator) ? ratedStiffness(isolator) / isolator.load.rated : 0)),
+    stiffnessPerLoad: column((isolator) =>
+      isAir(isolator) ? ratedStiffness(isolator) / isolator.load.rated : 0,
+    ),
     dashpot: column(dashpot),
     lossFactor: column(lossFactor),
   };

@@ -96,7 +96,12 @@ function slopesOf(x: readonly number[], y: readonly number[]): readonly number[]
   return x.map((_, i) => {
     if (i === 0) return endSlope(at(widths, 0), at(widths, 1), at(secants, 0), at(secants, 1));
     if (i === last)
-      return endSlope(at(widths, last - 1), at(widths, last - 2), at(secants, last - 1), at(secants, last - 2));
+      return endSlope(
+        at(widths, last - 1),
+        at(widths, last - 2),
+        at(secants, last - 1),
+        at(secants, last - 2),
+      );
     const before = at(secants, i - 1);
     const after = at(secants, i);
     if (before * after <= 0) return 0;

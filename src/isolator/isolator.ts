@@ -29,10 +29,10 @@ export type FrequencyPoint = readonly [frequencyHz: number, value: number];
 
 /** The static law along the isolator's axis. */
 export type Axial =
-  | { readonly kind: "linear"; /** N/m */ readonly stiffness: number }
-  | { readonly kind: "curve"; /** strictly rising in both */ readonly points: readonly CurvePoint[] }
+  | { readonly kind: "linear" /** N/m */; readonly stiffness: number }
+  | { readonly kind: "curve" /** strictly rising in both */; readonly points: readonly CurvePoint[] }
   /** An air spring: stiffness in proportion to load, so that this holds at any load in its range. */
-  | { readonly kind: "air"; /** Hz, a dynamic rating */ readonly naturalFrequencyHz: number };
+  | { readonly kind: "air" /** Hz, a dynamic rating */; readonly naturalFrequencyHz: number };
 
 export type Damping =
   /** Fraction of critical damping quoted at rated load; the dashpot it stands for is fixed. */
