@@ -34,10 +34,8 @@ export function openArchive(database: Database, limit: number, now: () => Date):
   const select = database.prepare<[string], KeptAnswer>(
     "SELECT answer, catalog, revision, created_at AS createdAt FROM selections WHERE id = ?",
   );
-  // The newest `limit` stay: everything up to the one just before them goes.
-  const clear = database.prepare(
-    "DELETE FROM selections WHERE seq <= (SELECT seq FROM selections ORDER BY seq DESC LIMIT 1 OFFSET ?)",
-  );
+  // Places in the row of answers are given without gaps, so the newest `limit` are told by number.
+  const clear = database.prepare("DELETE FROM selections WHERE seq <= (SELECT max(seq) FROM selections) - ?");
   let puts = 0;
   return {
     put({ id, answer, catalog, revision }) {

@@ -1,4 +1,5 @@
 import type { Isolator, IsolatorColumns } from "../isolator/index.ts";
+import { STANDARD_GRAVITY } from "../units/index.ts";
 import { type Evaluated, evaluate } from "./evaluate.ts";
 import type { Check, Gate } from "./gates.ts";
 import type { SelectionRequest } from "./request.ts";
@@ -65,16 +66,18 @@ export function nearMisses(rejects: Rejects): readonly NearMiss[] {
   for (const { arrangement, checks } of failed)
     keep(nearMiss([...new Set(arrangement.map((i) => i.designation))].join(" + "), checks));
 
+  const heaviest = Math.max(...loads);
+  const lightest = Math.min(...loads);
   const candidates = rows
-    .map((row) => ({ isolator: columns.isolators[row] as Isolator, miss: quickMiss(rejects, row) }))
+    .map((row) => ({ isolator: columns.isolators[row] as Isolator, miss: quickMiss(rejects, row, heaviest, lightest) }))
     .filter(({ miss, isolator }) => miss <= NEAR && !found.has(isolator.designation))
     .sort((a, b) => a.miss - b.miss)
     .slice(0, TRIED);
-  for (const { isolator } of candidates) {
-    const { checks } = evaluate(
-      request,
-      loads.map(() => isolator),
-    );
+  for (const { isolator, miss } of candidates) {
+    // Those that follow are farther off than what is found already.
+    if ([...found.values()].filter((nearer) => nearer.miss <= miss).length >= SHOWN) break;
+    const arrangement = loads.map(() => isolator);
+    const { checks } = evaluate(request, arrangement);
     keep(nearMiss(isolator.designation, [...sites.map((site) => site.check(isolator)), ...checks]));
   }
   return [...found.values()]
@@ -83,20 +86,27 @@ export function nearMisses(rejects: Rejects): readonly NearMiss[] {
     .map(({ miss: _, ...shown }) => shown);
 }
 
-/** How far the isolator alone misses by its columns, when it misses one number only; else Infinity. */
-function quickMiss({ request, columns, sites, loads, lines }: Rejects, row: number): number {
-  const isolator = columns.isolators[row] as Isolator;
-  const misses = sites
-    .map((site) => site.check(isolator))
-    .filter((check) => !check.passed)
-    .map(missOf);
-  const overload = Math.max(...loads) / (columns.maxLoad[row] as number);
-  const underload = (columns.minLoad[row] as number) / Math.min(...loads);
-  for (const miss of [overload, underload]) if (miss > 1) misses.push(miss);
-  if (misses.length > 1 || Math.max(...misses) > NEAR) return Number.POSITIVE_INFINITY;
+/**
+ * How far the isolator alone misses by its columns, when it misses one number only; else Infinity. The load, which
+ * most miss by far, is looked at first.
+ */
+function quickMiss(
+  { request, columns, sites, loads, lines }: Rejects,
+  row: number,
+  heaviest: number,
+  lightest: number,
+): number {
+  const overload = heaviest / (columns.maxLoad[row] as number);
+  const underload = (columns.minLoad[row] as number) / lightest;
+  const misses = [overload, underload].filter((miss) => miss > 1);
+  if (misses.length > 1 || overload > NEAR || underload > NEAR) return Number.POSITIVE_INFINITY;
 
-  const load = loads.reduce((s, v) => s + v, 0) / loads.length;
-  const over = overTarget(columns, row, load, request.machine.mass / loads.length, lines);
+  const isolator = columns.isolators[row] as Isolator;
+  for (const site of sites) if (!site.passes(isolator)) misses.push(missOf(site.check(isolator)));
+  if (misses.length > 1) return Number.POSITIVE_INFINITY;
+
+  const mean = (request.machine.mass * STANDARD_GRAVITY) / loads.length;
+  const over = overTarget(columns, row, mean, request.machine.mass / loads.length, lines);
   if (over > 1) misses.push(over);
   return misses.length > 1 ? Number.POSITIVE_INFINITY : Math.max(1, ...misses);
 }

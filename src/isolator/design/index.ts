@@ -1,0 +1,28 @@
+export {
+  type AirSpring,
+  ATMOSPHERE,
+  airSpringLoad,
+  airSpringStiffness,
+  FAST_EXPONENT,
+} from "./air-spring.ts";
+export {
+  compressionStiffness,
+  discShape,
+  RUBBERS,
+  type Rubber,
+  rectangleShape,
+  rubberOf,
+  shearStiffness,
+} from "./block.ts";
+export {
+  activeMass,
+  bucklingDeflection,
+  type HelicalSpring,
+  lateralRatio,
+  SPRING_STEEL,
+  type SpringMaterial,
+  springRate,
+  springStress,
+  surgeFrequency,
+  wahlFactor,
+} from "./helical-spring.ts";
