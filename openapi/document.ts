@@ -2,6 +2,7 @@ import { readFileSync } from "node:fs";
 import { join } from "node:path";
 import {
   createDocument,
+  type oas31,
   type ZodOpenApiContentObject,
   type ZodOpenApiObject,
   type ZodOpenApiOperationObject,
@@ -18,7 +19,7 @@ export function documentPath(expressPath: string): string {
 }
 
 /** The OpenAPI 3.1 document of the given routes. */
-export function buildDocument(routes: readonly Route[]) {
+export function buildDocument(routes: readonly Route[]): oas31.OpenAPIObject {
   return createDocument(describe(routes), { override: asAnswer });
 }
 

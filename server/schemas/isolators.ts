@@ -4,7 +4,7 @@ import { tableForms } from "./forms.ts";
 import { quantity } from "./quantity.ts";
 
 /** By what a list of isolators can be sorted; a leading minus turns the order round. */
-export const SORTS = [
+const SORTS = [
   "designation",
   "load",
   "stiffness",

@@ -23,7 +23,7 @@ const axis = z.enum(["x", "y", "z"]);
 const footCount = z.int().min(3).max(64);
 const extent = (description: string) => quantity("length", { above: 0, max: 1000, description });
 
-export const feet = z
+const feet = z
   .union([
     footCount.meta({ description: "How many feet, when their places are not known." }),
     z.strictObject({ count: footCount, length: extent("Along x."), width: extent("Along y.") }).meta({
@@ -35,7 +35,7 @@ export const feet = z
   ])
   .meta({ description: "The feet, one isolator each; four when left out." });
 
-export const speed = z
+const speed = z
   .union([
     quantity("speed", {
       min: 1,
@@ -63,7 +63,7 @@ const direction = z
   .tuple([z.number(), z.number(), z.number()])
   .meta({ description: "x, y, z; any length but zero." });
 
-export const excitation = z.union([
+const excitation = z.union([
   z
     .strictObject({
       kind: z.literal("force"),

@@ -25,7 +25,7 @@ const Mode = z.looseObject({
     .meta({ description: "Shares of the kinetic energy of x, y, z, roll, pitch, yaw." }),
 });
 
-export const OptionAnswer = z
+const OptionAnswer = z
   .looseObject({
     rank: z.int(),
     designation: z.string().meta({ description: 'The isolator, or those mixed, joined by " + ".' }),

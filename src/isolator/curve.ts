@@ -9,7 +9,7 @@ export interface Curve {
   readonly load: (deflection: number) => number;
   /** Tangent stiffness at a deflection, N/m. */
   readonly tangent: (deflection: number) => number;
-  /** Deflection at a load, m for N. */
+  /** Deflection at a load, m for N; infinite beyond the last point of a curve that ends flat. */
   readonly deflection: (load: number) => number;
 }
 
@@ -66,8 +66,10 @@ export function curveThrough(points: readonly CurvePoint[]): Curve {
     load: (deflection) => evaluate(deflection).load,
     tangent: (deflection) => evaluate(deflection).tangent,
     deflection(load) {
-      if (load <= at(y, 0)) return at(x, 0) + (load - at(y, 0)) / at(slopes, 0);
-      if (load >= at(y, last)) return at(x, last) + (load - at(y, last)) / at(slopes, last);
+      if (load === at(y, last)) return at(x, last);
+      if (load <= at(y, 0))
+        return load === at(y, 0) ? at(x, 0) : at(x, 0) + (load - at(y, 0)) / at(slopes, 0);
+      if (load > at(y, last)) return at(x, last) + (load - at(y, last)) / at(slopes, last);
       const i = segmentOf(y, load);
       let lo = at(x, i);
       let hi = at(x, i + 1);

@@ -41,7 +41,7 @@ const ZERO: Complex = { re: 0, im: 0 };
  * @param topSpeed  highest running speed, rad/s, > 0
  * @returns         kg·m
  */
-export function unbalanceMoment(excitation: UnbalanceExcitation, topSpeed: number): number {
+function unbalanceMoment(excitation: UnbalanceExcitation, topSpeed: number): number {
   const { unbalance, order } = excitation;
   return unbalance.kind === "moment"
     ? unbalance.moment

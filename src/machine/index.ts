@@ -7,7 +7,6 @@ export {
   type Sense,
   sensesOf,
   type UnbalanceExcitation,
-  unbalanceMoment,
 } from "./excitation.ts";
 export { centroid, footprintPositions, requireCarryingFeet, withinOutline } from "./feet.ts";
 export type { Axis, Foot, Machine, NamedPoint, Rotation, SpeedRange } from "./machine.ts";

@@ -1,7 +1,7 @@
 export type { Arrangement } from "./arrange.ts";
 export { cautionsFor } from "./cautions.ts";
-export { type Evaluated, evaluate } from "./evaluate.ts";
-export { type Check, firstFailure, GATES, type Gate } from "./gates.ts";
+export type { Evaluated } from "./evaluate.ts";
+export { type Check, GATES, type Gate } from "./gates.ts";
 export type { NearMiss } from "./near-misses.ts";
 export type { Needed } from "./needed.ts";
 export type { Option } from "./rank.ts";
@@ -13,7 +13,6 @@ export {
   type Ranking,
   type SelectionRequest,
   type Target,
-  transmissibilityLimit,
 } from "./request.ts";
 export { type ScreenLine, type ScreenTask, screen } from "./screen.ts";
 export { type Counts, type Selection, select } from "./select.ts";

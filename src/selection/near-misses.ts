@@ -69,7 +69,10 @@ export function nearMisses(rejects: Rejects): readonly NearMiss[] {
   const heaviest = Math.max(...loads);
   const lightest = Math.min(...loads);
   const candidates = rows
-    .map((row) => ({ isolator: columns.isolators[row] as Isolator, miss: quickMiss(rejects, row, heaviest, lightest) }))
+    .map((row) => ({
+      isolator: columns.isolators[row] as Isolator,
+      miss: quickMiss(rejects, row, heaviest, lightest),
+    }))
     .filter(({ miss, isolator }) => miss <= NEAR && !found.has(isolator.designation))
     .sort((a, b) => a.miss - b.miss)
     .slice(0, TRIED);

@@ -1,4 +1,5 @@
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
+import type { IsolatorRecord } from "../../src/isolator/index.ts";
 import { BOOK_SPRINGS } from "../references/books.ts";
 import { DEFLECTION_NEEDED_MM } from "../references/transmissibility.ts";
 import { expectClose } from "../support/expect-close.ts";
@@ -249,13 +250,13 @@ describe("pages", () => {
   test("refuse a cursor once the catalogue has a new revision", async () => {
     const ask = { ...PAGED, catalog: "moving", mass: 100 };
     const list = Array.from({ length: 9 }, (_, i) => ({
-      ...(BOOK_SPRINGS[0] as object),
+      ...(BOOK_SPRINGS[0] as IsolatorRecord),
       designation: `s${i}`,
       load_n: { max: 3000 },
     }));
-    service.context.store.importRevision("moving", list as typeof BOOK_SPRINGS, { activate: true });
+    service.context.store.importRevision("moving", list, { activate: true });
     const { next_cursor } = await select({ ...ask, speed: 3000, target: { transmissibility: 0.5 } });
-    service.context.store.importRevision("moving", list.slice(1) as typeof BOOK_SPRINGS, { activate: true });
+    service.context.store.importRevision("moving", list.slice(1), { activate: true });
     const stale = await api
       .post("/v1/selections")
       .send({ ...ask, speed: 3000, target: { transmissibility: 0.5 }, cursor: next_cursor });

@@ -1,5 +1,5 @@
 /** Standard atmosphere, Pa (ISO 2533). */
-export const ATMOSPHERE = 101_325;
+const ATMOSPHERE = 101_325;
 
 /** Polytropic exponent of air that is compressed fast (common practice for vibration above 1 Hz). */
 export const FAST_EXPONENT = 1.38;

@@ -26,7 +26,7 @@ const rubber = (hardness: number, e: number, g: number, weight: number, bulk: nu
  * Natural rubber, filled with SRF black above 48 IRHD; hardness ± 2.
  * Source: P. B. Lindley, Engineering Design with Natural Rubber (recalled; two rows met in print within 2.5 %).
  */
-export const RUBBERS: readonly Rubber[] = [
+const RUBBERS: readonly Rubber[] = [
   rubber(30, 0.92, 0.3, 0.93, 1000),
   rubber(35, 1.18, 0.37, 0.89, 1000),
   rubber(40, 1.5, 0.45, 0.85, 1000),

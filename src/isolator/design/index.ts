@@ -1,6 +1,5 @@
 export {
   type AirSpring,
-  ATMOSPHERE,
   airSpringLoad,
   airSpringStiffness,
   FAST_EXPONENT,
@@ -8,7 +7,6 @@ export {
 export {
   compressionStiffness,
   discShape,
-  RUBBERS,
   type Rubber,
   rectangleShape,
   rubberOf,
