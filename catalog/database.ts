@@ -18,12 +18,17 @@ export function openDatabase(dataDir: string): Database.Database {
   let database: Database.Database | undefined;
   try {
     database = new Database(path, { timeout: BUSY_MS });
-    requireKnownVersion(path, database.pragma("user_version", { simple: true }) as number);
+    const version = database.pragma("user_version", { simple: true }) as number;
+    requireKnownVersion(path, version);
+    // Marked before WAL is on, and checkpointed once up to date, so that the head of the file itself tells what it
+    // is whatever becomes of this process.
+    if (version === 0) database.pragma(`application_id = ${APPLICATION_ID}`);
     database.pragma("journal_mode = WAL");
     // With WAL a power cut can lose the last answers kept, never the file.
     database.pragma("synchronous = NORMAL");
     database.pragma("foreign_keys = ON");
     migrate(database);
+    if (version < SCHEMA_VERSION) database.pragma("wal_checkpoint(TRUNCATE)");
     return database;
   } catch (error) {
     database?.close();

@@ -64,7 +64,6 @@ export function migrate(database: Database): void {
     if (step < done) return;
     database.transaction(() => {
       database.exec(sql);
-      database.pragma(`application_id = ${APPLICATION_ID}`);
       database.pragma(`user_version = ${step + 1}`);
     })();
   });
