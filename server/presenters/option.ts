@@ -8,19 +8,18 @@ export function presentOption(option: Option, request: SelectionRequest) {
   const { analysis, arrangement } = option;
   const { worst, worstForce } = analysis;
   const { machine } = request;
+  const items = itemsOf(option);
   const families = [...new Set(arrangement.map((isolator) => isolator.family))];
   const transmissibility = finite(worst?.transmissibility);
   const transmittedForce = finite(worstForce?.transmittedForce);
   const lowest = machine.speed.min * (machine.orders[0] as number);
   return {
     rank: option.rank,
-    designation: itemsOf(option)
-      .map((item) => item.isolator)
-      .join(" + "),
+    designation: items.map((item) => item.isolator).join(" + "),
     series: arrangement[0]?.series ?? null,
     family: families.join(" + "),
     quantity: arrangement.length,
-    items: itemsOf(option),
+    items,
     feet: analysis.feet.map(presentFoot),
     static_deflection_mm: inUnit(analysis.staticDeflection, "mm"),
     levelness_mm: inUnit(analysis.levelness, "mm"),

@@ -4,14 +4,7 @@ import { tableForms } from "./forms.ts";
 import { quantity } from "./quantity.ts";
 
 /** By what a list of isolators can be sorted; a leading minus turns the order round. */
-const SORTS = [
-  "designation",
-  "load",
-  "stiffness",
-  "natural_frequency",
-  "free_height",
-  "price",
-] as const;
+const SORTS = ["designation", "load", "stiffness", "natural_frequency", "free_height", "price"] as const;
 export type Sort = (typeof SORTS)[number];
 
 const anyOf = <T extends string>(values: readonly T[], description: string) =>

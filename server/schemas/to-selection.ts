@@ -4,6 +4,8 @@ import { toSI } from "../../src/units/index.ts";
 import type { SelectionBody } from "./selection.ts";
 import { machineAssumptions, toMachine, withMachineDefaults } from "./to-machine.ts";
 
+type Target = NonNullable<SelectionBody["target"]>;
+
 const DEFAULT_TRANSMISSIBILITY = 0.1;
 const DEFAULT_RATINGS = 2;
 const DEFAULT_PAGE = 10;
@@ -44,9 +46,7 @@ export function understand(body: SelectionBody): AskedSelection {
         captive: environment.captive ?? false,
       },
       target: {
-        transmissibility: optional(target.transmissibility),
-        isolationEfficiency:
-          target.isolation_efficiency === undefined ? null : target.isolation_efficiency / 100,
+        transmissibility: transmissibilityOf(target),
         transmittedForce:
           target.transmitted_force === undefined ? null : toSI(target.transmitted_force, "force"),
       },
@@ -63,6 +63,13 @@ export function understand(body: SelectionBody): AskedSelection {
       rankBy: optional(body.rank_by),
     },
   };
+}
+
+/** The transmissibility that a target allows, whether stated as such, as an efficiency in per cent, or both. */
+function transmissibilityOf(target: Target): number | null {
+  const { transmissibility, isolation_efficiency: efficiency } = target;
+  if (efficiency === undefined) return transmissibility ?? null;
+  return Math.min(transmissibility ?? Number.POSITIVE_INFINITY, (100 - efficiency) / 100);
 }
 
 function temperatureOf(site: { min?: number | undefined; max?: number | undefined } | undefined) {

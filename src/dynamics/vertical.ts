@@ -43,19 +43,27 @@ export function transmissibilityOf(mass: number, { k, c, h }: ComplexStiffness, 
   return Math.sqrt((k * k + loss * loss) / (inertia * inertia + loss * loss));
 }
 
+function stiffnessOf({ isolator, load }: Mount, frequencyHz: number) {
+  const k = dynamicStiffness(isolator, load, frequencyHz);
+  return { k, c: dashpot(isolator), h: lossFactor(isolator) * k };
+}
+
 /** The vertical model of a machine of `mass` kg on `mounts`, one a foot. */
 export function verticalModel(mass: number, mounts: readonly Mount[]): VerticalModel {
   const sumAt = (frequencyHz: number): ComplexStiffness => {
-    let k = 0;
-    let c = 0;
-    let h = 0;
-    for (const { isolator, load } of mounts) {
-      const stiffness = dynamicStiffness(isolator, load, frequencyHz);
-      k += stiffness;
-      c += dashpot(isolator);
-      h += lossFactor(isolator) * stiffness;
+    const sum = { k: 0, c: 0, h: 0 };
+    let one = sum;
+    let before: Mount | undefined;
+    for (const mount of mounts) {
+      // Feet mostly carry alike.
+      if (mount.isolator !== before?.isolator || mount.load !== before.load)
+        one = stiffnessOf(mount, frequencyHz);
+      before = mount;
+      sum.k += one.k;
+      sum.c += one.c;
+      sum.h += one.h;
     }
-    return { k, c, h };
+    return sum;
   };
   // Only a dynamic ratio given against frequency makes the stiffness depend on it.
   if (mounts.some(({ isolator }) => typeof isolator.dynamicRatio !== "number"))

@@ -39,6 +39,8 @@ export function dynamicStiffness(isolator: Isolator, load: number, frequencyHz: 
  */
 export function ratedNaturalFrequency(isolator: Isolator): number {
   const { rated } = isolator.load;
+  if (typeof isolator.dynamicRatio === "number")
+    return Math.sqrt((dynamicStiffness(isolator, rated, 1) * STANDARD_GRAVITY) / rated) / (2 * Math.PI);
   let frequency = Math.sqrt((staticStiffness(isolator, rated) * STANDARD_GRAVITY) / rated) / (2 * Math.PI);
   for (let i = 0; i < MAX_ITERATIONS; i++) {
     const stiffness = dynamicStiffness(isolator, rated, frequency);

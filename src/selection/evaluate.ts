@@ -1,7 +1,7 @@
 import { type Analysis, analyse, type FootState } from "../dynamics/index.ts";
 import type { Arrangement } from "./arrange.ts";
 import type { Check, Gate } from "./gates.ts";
-import { type SelectionRequest, transmissibilityLimit } from "./request.ts";
+import type { SelectionRequest } from "./request.ts";
 
 /** A mode this close to an excitation line, relative to the line, is excited at resonance. */
 const RESONANCE_BAND = 0.2;
@@ -60,8 +60,8 @@ function loadChecks(feet: readonly FootState[]): readonly Check[] {
 
 function targetChecks({ target }: SelectionRequest, { worst, worstForce }: Analysis): readonly Check[] {
   const checks: Check[] = [];
-  const limit = transmissibilityLimit(target);
-  if (limit !== null) checks.push(atMost("transmissibility", worst?.transmissibility ?? null, limit));
+  if (target.transmissibility !== null)
+    checks.push(atMost("transmissibility", worst?.transmissibility ?? null, target.transmissibility));
   if (target.transmittedForce !== null)
     checks.push(atMost("transmitted_force", worstForce?.transmittedForce ?? null, target.transmittedForce));
   return checks;
@@ -76,10 +76,12 @@ function marginOf(targets: readonly Check[]): number | null {
 
 /** At a fixed speed no mode may lie close to an excitation line; reports the nearest, as mode over line. */
 function resonanceCheck({ machine }: SelectionRequest, { modes }: Analysis): Check {
-  const ratios = modes.flatMap((mode) =>
-    machine.orders.map((order) => mode.omega / (order * machine.speed.max)),
-  );
-  const nearest = ratios.reduce((a, b) => (Math.abs(b - 1) < Math.abs(a - 1) ? b : a));
+  let nearest = Number.POSITIVE_INFINITY;
+  for (const { omega } of modes)
+    for (const order of machine.orders) {
+      const ratio = omega / (order * machine.speed.max);
+      if (Math.abs(ratio - 1) < Math.abs(nearest - 1)) nearest = ratio;
+    }
   return {
     gate: "resonance",
     value: nearest,

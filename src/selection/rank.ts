@@ -14,6 +14,9 @@ export interface Ranked {
   readonly rankedBy: Ranking;
 }
 
+/** What options are compared by: the smaller the better. */
+type Key = (option: Evaluated) => number;
+
 /**
  * Puts passing arrangements in order. Ties fall to the next order of `RANKINGS`, then to the designations, so
  * that equal input always gives the same list.
@@ -22,12 +25,11 @@ export interface Ranked {
  */
 export function rank(passing: readonly Evaluated[], rankBy: Ranking | null, currency: string | null): Ranked {
   const compared = currency ?? commonCurrency(passing);
-  const priced = (option: Evaluated): number =>
+  const priced: Key = (option) =>
     option.price !== null && option.currency === compared ? option.price : Number.POSITIVE_INFINITY;
   const rankedBy = rankBy ?? (passing.every((option) => priced(option) < Infinity) ? "price" : "stability");
 
-  // Each key is the smaller the better.
-  const keys: Readonly<Record<Ranking, (option: Evaluated) => number>> = {
+  const keys: Readonly<Record<Ranking, Key>> = {
     price: priced,
     transmitted_force: transmitted,
     stability: (option) => option.analysis.staticDeflection,
@@ -36,13 +38,7 @@ export function rank(passing: readonly Evaluated[], rankBy: Ranking | null, curr
   const order = [rankedBy, ...RANKINGS.filter((ranking) => ranking !== rankedBy)].map(
     (ranking) => keys[ranking],
   );
-  const rows = passing.map((option) => ({
-    option,
-    keys: order.map((key) => key(option)),
-    name: nameOf(option),
-  }));
-  rows.sort((a, b) => compareKeys(a.keys, b.keys) || (a.name < b.name ? -1 : a.name > b.name ? 1 : 0));
-  const sorted = rows.map(({ option }) => option);
+  const sorted = [...passing].sort((a, b) => compareBy(order, a, b) || (nameOf(a) < nameOf(b) ? -1 : 1));
   const beaten = beatenOf(sorted, priced);
   return {
     rankedBy,
@@ -61,12 +57,12 @@ function nameOf({ arrangement }: Evaluated): string {
   return arrangement.map((isolator) => isolator.designation).join("\n");
 }
 
-function compareKeys(a: readonly number[], b: readonly number[]): number {
-  for (let i = 0; i < a.length; i++) {
-    const x = a[i] as number;
-    const y = b[i] as number;
-    if (x < y) return -1;
-    if (x > y) return 1;
+/** The order of two options by the first key that tells them apart; 0 when none does. */
+function compareBy(keys: readonly Key[], a: Evaluated, b: Evaluated): number {
+  for (const key of keys) {
+    const x = key(a);
+    const y = key(b);
+    if (x !== y) return x < y ? -1 : 1;
   }
   return 0;
 }
@@ -80,28 +76,20 @@ function commonCurrency(passing: readonly Evaluated[]): string | null {
 }
 
 /** The options that another one beats. */
-function beatenOf(
-  options: readonly Evaluated[],
-  priced: (option: Evaluated) => number,
-): ReadonlySet<Evaluated> {
-  const rows = options.map((option) => ({
-    option,
-    keys: [
-      priced(option),
-      option.analysis.worst?.transmissibility ?? Infinity,
-      option.analysis.staticDeflection,
-    ],
-  }));
-  rows.sort((a, b) => compareKeys(a.keys, b.keys));
+function beatenOf(options: readonly Evaluated[], priced: Key): ReadonlySet<Evaluated> {
+  const keys: readonly Key[] = [
+    priced,
+    (option) => option.analysis.worst?.transmissibility ?? Number.POSITIVE_INFINITY,
+    (option) => option.analysis.staticDeflection,
+  ];
+  const beats = (a: Evaluated, b: Evaluated): boolean =>
+    keys.every((key) => key(a) <= key(b)) && keys.some((key) => key(a) < key(b));
   const beaten = new Set<Evaluated>();
-  // Sorted so, only an earlier row can beat a later one, and it is enough to look among those unbeaten so far.
-  const front: (readonly number[])[] = [];
-  for (const { option, keys } of rows) {
-    const beats = (other: readonly number[]): boolean =>
-      other.every((value, i) => value <= (keys[i] as number)) &&
-      other.some((value, i) => value < (keys[i] as number));
-    if (front.some(beats)) beaten.add(option);
-    else front.push(keys);
+  // Sorted so, only an earlier one can beat a later, and it is enough to look among those unbeaten so far.
+  const front: Evaluated[] = [];
+  for (const option of [...options].sort((a, b) => compareBy(keys, a, b))) {
+    if (front.some((other) => beats(other, option))) beaten.add(option);
+    else front.push(option);
   }
   return beaten;
 }

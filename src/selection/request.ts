@@ -11,10 +11,8 @@ export type Ranking = (typeof RANKINGS)[number];
 
 /** What must hold; at least one is not `null`, and all that are must hold together. */
 export interface Target {
-  /** Largest transmissibility, dimensionless, > 0. */
+  /** Largest transmissibility, dimensionless, > 0; an isolation efficiency E asks for 1 − E. */
   readonly transmissibility: number | null;
-  /** Least isolation efficiency 1 − T, a fraction under 1. */
-  readonly isolationEfficiency: number | null;
   /** Largest transmitted force, N, zero to peak. */
   readonly transmittedForce: number | null;
 }
@@ -52,10 +50,4 @@ export interface SelectionRequest {
   readonly limits: Limits;
   /** `null` leaves the order to what is known: price when every option is priced alike, else stability. */
   readonly rankBy: Ranking | null;
-}
-
-/** The transmissibility that the targets allow, or `null` when none speaks of it. */
-export function transmissibilityLimit({ transmissibility, isolationEfficiency }: Target): number | null {
-  if (isolationEfficiency === null) return transmissibility;
-  return Math.min(transmissibility ?? Number.POSITIVE_INFINITY, 1 - isolationEfficiency);
 }

@@ -1,6 +1,6 @@
 import { verticalForce } from "../dynamics/index.ts";
 import type { Gate } from "./gates.ts";
-import { type SelectionRequest, transmissibilityLimit } from "./request.ts";
+import type { SelectionRequest } from "./request.ts";
 
 /** What one target allows at one excitation frequency. */
 export interface TargetLine {
@@ -17,15 +17,14 @@ export interface TargetLine {
  */
 export function targetLines({ machine, target }: SelectionRequest): readonly TargetLine[] {
   const { min, max } = machine.speed;
-  const stated = transmissibilityLimit(target);
-  const { transmittedForce } = target;
+  const { transmissibility, transmittedForce } = target;
   const lines: TargetLine[] = [];
   for (const order of machine.orders)
     for (const speed of new Set([min, max])) {
       const force = verticalForce(machine, order, speed);
       if (force === null) continue;
       const omega = order * speed;
-      if (stated !== null) lines.push({ gate: "transmissibility", omega, limit: stated });
+      if (transmissibility !== null) lines.push({ gate: "transmissibility", omega, limit: transmissibility });
       if (transmittedForce !== null && force !== undefined)
         lines.push({ gate: "transmitted_force", omega, limit: transmittedForce / force });
     }

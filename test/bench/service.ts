@@ -4,6 +4,9 @@ import { performance } from "node:perf_hooks";
 
 const ADDRESS = /http:\/\/127\.0\.0\.1:\d+/;
 
+/** As `npm start` has it: a young generation this small costs little speed and saves a third of the memory. */
+const NODE_FLAGS = ["--max-semi-space-size=4"];
+
 /** A server in a process of its own. */
 export interface Service {
   readonly url: string;
@@ -20,7 +23,7 @@ export function startService(
   environment: Readonly<Record<string, string>> = {},
 ): Promise<Service> {
   const start = performance.now();
-  const child: ChildProcess = spawn(process.execPath, [script.pathname], {
+  const child: ChildProcess = spawn(process.execPath, [...NODE_FLAGS, script.pathname], {
     env: { ...process.env, PORT: "0", ...environment },
     stdio: ["ignore", "pipe", "inherit"],
   });
