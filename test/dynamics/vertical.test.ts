@@ -1,3 +1,4 @@
+import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { permissibleUnbalance } from "../../src/criteria/index.ts";
 import { transmissibilityOf, worstOver } from "../../src/dynamics/index.ts";
@@ -52,6 +53,28 @@ describe("transmissibility of one degree of freedom", () => {
         because: "an identity but for rounding of √2",
       });
     }
+  });
+
+  test("never falls as a mount is made stiffer, above resonance and with equal damping", () => {
+    const positive = (min: number, max: number) => fc.double({ min, max, noNaN: true });
+    fc.assert(
+      fc.property(
+        positive(0.01, 0.45),
+        positive(1, 1.1),
+        positive(0, 1),
+        positive(0, 0.5),
+        (k, times, zeta, eta) => {
+          // A unit mass at ω = 1: k under a half is more than √2 above resonance, before and after stiffening.
+          const at = (stiffness: number): number =>
+            transmissibilityOf(
+              1,
+              { k: stiffness, c: 2 * zeta * Math.sqrt(stiffness), h: eta * stiffness },
+              1,
+            );
+          expect(at(k * times)).toBeGreaterThanOrEqual(at(k) * (1 - 1e-12));
+        },
+      ),
+    );
   });
 
   test("isolates with structural damping better than with the same damping at resonance made viscous", () => {

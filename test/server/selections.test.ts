@@ -1,3 +1,4 @@
+import fc from "fast-check";
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
 import type { IsolatorRecord } from "../../src/isolator/index.ts";
 import { BOOK_SPRINGS } from "../references/books.ts";
@@ -176,20 +177,35 @@ describe("the request as understood", () => {
     expect((await select(turned)).id).toBe((await select(FULL)).id);
   });
 
-  test("gives the same numbers in any units", async () => {
-    const metric = await select({ mass: "850 kg", speed: "1180 rpm", target: { transmissibility: 0.08 } });
-    const mixed = await select({
-      mass: `${850 / 0.45359237} lb`,
-      speed: `${1180 / 60} Hz`,
-      target: { isolation_efficiency: 92 },
-    });
-    expect(mixed.options.map((o: { designation: string }) => o.designation)).toEqual(
-      metric.options.map((o: { designation: string }) => o.designation),
+  test("gives the same ranking and numbers whatever units it is asked in", async () => {
+    await fc.assert(
+      fc.asyncProperty(
+        fc.double({ min: 50, max: 5000, noNaN: true }),
+        fc.double({ min: 500, max: 3600, noNaN: true }),
+        fc.double({ min: 70, max: 97, noNaN: true }),
+        async (kg, rpm, percent) => {
+          const metric = await select({
+            mass: kg,
+            speed: rpm,
+            target: { transmissibility: 1 - percent / 100 },
+          });
+          const other = await select({
+            mass: `${kg / 0.45359237} lb`,
+            speed: `${rpm / 60} Hz`,
+            target: { isolation_efficiency: percent },
+          });
+          const names = (answer: typeof metric) =>
+            answer.options.map((o: { designation: string }) => o.designation);
+          expect(names(other)).toEqual(names(metric));
+          for (const [i, option] of metric.options.entries())
+            expectClose(other.options[i].transmissibility, option.transmissibility, {
+              rtol: 1e-10,
+              because: "rounding of two conversions",
+            });
+        },
+      ),
+      { numRuns: 40 },
     );
-    expectClose(mixed.options[0].transmissibility, metric.options[0].transmissibility, {
-      rtol: 1e-12,
-      because: "rounding of the conversion",
-    });
   });
 });
 
