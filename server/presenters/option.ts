@@ -6,12 +6,11 @@ import { finite } from "./number.ts";
 /** One option as JSON: plain numbers, each key ending in its unit. */
 export function presentOption(option: Option, request: SelectionRequest) {
   const { analysis, arrangement } = option;
-  const { worst, worstForce } = analysis;
+  const { worst, judged, naturalFrequency, modes } = analysis;
   const { machine } = request;
   const items = itemsOf(option);
   const families = [...new Set(arrangement.map((isolator) => isolator.family))];
-  const transmissibility = finite(worst?.transmissibility);
-  const transmittedForce = finite(worstForce?.transmittedForce);
+  const transmissibility = finite(judged.transmissibility);
   const lowest = machine.speed.min * (machine.orders[0] as number);
   return {
     rank: option.rank,
@@ -23,15 +22,18 @@ export function presentOption(option: Option, request: SelectionRequest) {
     feet: analysis.feet.map(presentFoot),
     static_deflection_mm: inUnit(analysis.staticDeflection, "mm"),
     levelness_mm: inUnit(analysis.levelness, "mm"),
-    natural_frequency_hz: inUnit(analysis.naturalFrequency, "Hz"),
-    frequency_ratio: lowest / analysis.naturalFrequency,
+    natural_frequency_hz: naturalFrequency === null ? null : inUnit(naturalFrequency, "Hz"),
+    frequency_ratio: naturalFrequency === null ? null : lowest / naturalFrequency,
     damping_ratio: analysis.dampingRatio,
     transmissibility,
     isolation_efficiency_percent: transmissibility === null ? null : 100 * (1 - transmissibility),
-    transmitted_force_n: transmittedForce,
+    net_transmissibility: finite(worst?.netTransmissibility),
+    transmitted_force_n: finite(judged.transmittedForce),
     worst_speed_rpm: worst === null ? null : inUnit(worst.speed, "rpm"),
     margin: finite(option.margin),
-    modes: analysis.modes.map(presentMode),
+    model: analysis.model,
+    tilt_mrad: analysis.tilt && { x: 1000 * analysis.tilt.x, y: 1000 * analysis.tilt.y },
+    modes: modes?.map(presentMode) ?? null,
     price: option.price,
     currency: option.currency,
     unbeaten: option.unbeaten,
@@ -50,19 +52,23 @@ function itemsOf({ arrangement }: Option) {
   }));
 }
 
-function presentFoot({ foot, isolator, load, utilisation, staticDeflection }: FootState) {
+export function presentFoot({ foot, isolator, load, lateralLoad, utilisation, staticDeflection }: FootState) {
   return {
     foot,
     isolator: isolator.designation,
     load_n: load,
     utilisation,
     static_deflection_mm: inUnit(staticDeflection, "mm"),
+    lateral_load_n: lateralLoad,
   };
 }
 
-function presentMode({ omega, dampingRatio, shape, energy }: Mode) {
-  return { frequency_hz: inUnit(omega, "Hz"), damping_ratio: dampingRatio, shape, energy };
+export function presentMode({ omega, dampingRatio, shape, energy, vector }: Mode) {
+  return { frequency_hz: inUnit(omega, "Hz"), damping_ratio: dampingRatio, shape, energy, vector };
 }
+
+/** How far the foot sum may be above the net value before a note says so. */
+const NET_DIFFERS = 1.5;
 
 /** What the numbers of one option do not say, the reason of every null among them. */
 function notesOf(
@@ -71,9 +77,17 @@ function notesOf(
 ): string[] {
   const notes: string[] = [];
   if (analysis.worst === null)
-    notes.push("transmissibility: nothing acts vertically, and the vertical model knows no other direction.");
+    notes.push(
+      analysis.model === "vertical"
+        ? "transmissibility: nothing acts vertically, and the vertical model knows no other direction."
+        : "transmissibility: the forces that act cancel; their moments are judged by the force transmitted.",
+    );
   else if (finite(analysis.worst.transmissibility) === null)
     notes.push("transmissibility: an undamped natural frequency is met exactly; no bound can be given.");
+  if (analysis.modes === null) notes.push("modes: nothing holds the machine in every direction.");
+  const { worst } = analysis;
+  if ((worst?.transmissibility ?? 0) > NET_DIFFERS * (worst?.netTransmissibility ?? Number.POSITIVE_INFINITY))
+    notes.push("The feet push against one another: the sum of their forces is well above the net force.");
   if (machine.excitations.length === 0) notes.push("transmitted_force_n: no excitation is stated.");
   if (price === null) notes.push("price: not every isolator is priced in one currency.");
   if (environment.temperature !== null && arrangement.some((isolator) => isolator.temperature === null))
@@ -82,7 +96,7 @@ function notesOf(
     notes.push("Air springs: taken as levelled; they need air supply and levelling valves.");
   const { min, max } = machine.speed;
   if (min < max)
-    for (const mode of analysis.modes)
+    for (const mode of analysis.modes ?? [])
       for (const order of machine.orders)
         if (mode.omega >= order * min && mode.omega <= order * max)
           notes.push(

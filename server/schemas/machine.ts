@@ -18,6 +18,15 @@ const point = z
   })
   .meta({ description: "A point in the machine's frame: x along its length, y along its width, z up." });
 
+const direction = z
+  .tuple([z.number(), z.number(), z.number()])
+  .meta({ description: "x, y, z; any length but zero." });
+
+const foot = z.strictObject({
+  ...point.shape,
+  axis: direction.optional().meta({ description: "The isolator's own direction; upright when left out." }),
+});
+
 const axis = z.enum(["x", "y", "z"]);
 
 const footCount = z.int().min(3).max(64);
@@ -30,7 +39,7 @@ const feet = z
       description: "A footprint: two rows along x; three feet stand two at the back and one in front.",
     }),
     z
-      .strictObject({ positions: z.array(point).min(3).max(64) })
+      .strictObject({ positions: z.array(foot).min(3).max(64) })
       .meta({ description: "The elastic centres of the isolators." }),
   ])
   .meta({ description: "The feet, one isolator each; four when left out." });
@@ -58,10 +67,6 @@ const line = {
   phase_deg: z.number().min(-360).max(360).optional(),
   order: order.optional().meta({ description: "Multiple of the running speed; 1 when left out." }),
 };
-
-const direction = z
-  .tuple([z.number(), z.number(), z.number()])
-  .meta({ description: "x, y, z; any length but zero." });
 
 const excitation = z.union([
   z
@@ -92,6 +97,38 @@ const excitation = z.union([
     .meta({ description: "The residual unbalance that a balance grade permits at the top speed." }),
 ]);
 
+const inertiaElement = (least: { above?: number; min?: number }) =>
+  quantity("inertia", { max: 1e12, ...least });
+
+const inertia = z
+  .strictObject({
+    xx: inertiaElement({ above: 0 }),
+    yy: inertiaElement({ above: 0 }),
+    zz: inertiaElement({ above: 0 }),
+    xy: inertiaElement({ min: -1e12 }).optional(),
+    xz: inertiaElement({ min: -1e12 }).optional(),
+    yz: inertiaElement({ min: -1e12 }).optional(),
+  })
+  .meta({
+    description:
+      "Inertia tensor of the machine about its centre of gravity, the elements as they stand in the mass matrix: xy = −∫xy dm.",
+  });
+
+const base = z
+  .strictObject({
+    kind: z.literal("inertia").optional(),
+    length: extent("Along x.").optional(),
+    width: extent("Along y.").optional(),
+    thickness: extent("Upward.").optional(),
+    material: z.enum(["concrete", "steel"]).optional().meta({ description: "concrete when left out." }),
+    mass: quantity("mass", { above: 0, max: 1e7, description: "Overrides the density." }).optional(),
+    at: point.optional().meta({ description: "Its centre; under the middle of the feet when left out." }),
+  })
+  .meta({
+    description:
+      "An inertia base between machine and isolators: its three dimensions, or its mass alone, which allows the vertical model only.",
+  });
+
 /** What is known of the machine. */
 export const machineFields = {
   name: z.string().max(200).optional().meta({ description: "What you call the machine." }),
@@ -111,17 +148,27 @@ export const machineFields = {
     .meta({ description: "Multiples of the speed to judge; [1] when left out." }),
   feet: feet.optional(),
   centre_of_gravity: point.optional(),
-  envelope: notYet(),
-  inertia: notYet(),
+  envelope: z
+    .strictObject({ length: extent("Along x."), width: extent("Along y."), height: extent("Upward.") })
+    .optional()
+    .meta({
+      description: "The machine's outline, a uniform box of which stands for an inertia that is not given.",
+    }),
+  inertia: inertia.optional(),
   shaft_axis: axis.optional().meta({ description: "x when left out." }),
   rotation: z
     .enum(["right_handed", "left_handed", "either"])
     .optional()
     .meta({ description: "either when left out." }),
   excitation: z.array(excitation).min(1).max(32).optional(),
+  points: z
+    .array(z.strictObject({ name: z.string().min(1).max(100), at: point }))
+    .max(32)
+    .optional()
+    .meta({ description: "Places on the machine whose velocity is asked for." }),
   run_up: notYet(),
   coast_down: notYet(),
-  base: notYet(),
+  base: base.optional(),
   support: z
     .strictObject({
       kind: z.literal("rigid", { error: "only a rigid support is supported by this version" }),

@@ -13,12 +13,17 @@ const Foot = z.looseObject({
   load_n: number,
   utilisation: number.meta({ description: "Static load over the isolator's maximum." }),
   static_deflection_mm: number,
+  lateral_load_n: number.nullable().meta({ description: "Across the axis; null for an upright isolator." }),
 });
 
 const Mode = z.looseObject({
   frequency_hz: number,
   damping_ratio: number,
   shape: z.enum(["along_x", "along_y", "vertical", "roll", "pitch", "yaw"]),
+  vector: z
+    .array(number)
+    .length(6)
+    .meta({ description: "Displacements, and rotations times their radius of gyration; the largest is 1." }),
   energy: z
     .array(number)
     .length(6)
@@ -38,15 +43,20 @@ const OptionAnswer = z
     feet: z.array(Foot),
     static_deflection_mm: number.meta({ description: "Mean over the feet." }),
     levelness_mm: number.meta({ description: "Largest difference in static deflection across the feet." }),
-    natural_frequency_hz: number.meta({ description: "Of the vertical mode." }),
-    frequency_ratio: number.meta({ description: "Lowest excitation frequency over natural frequency." }),
-    damping_ratio: number.meta({ description: "Equivalent viscous, of the vertical mode." }),
+    natural_frequency_hz: known("Of the mode that moves most vertically."),
+    frequency_ratio: known("Lowest excitation frequency over natural frequency."),
+    damping_ratio: known("Equivalent viscous, of the mode that moves most vertically."),
     transmissibility: known("The largest over the speed range and orders."),
     isolation_efficiency_percent: known("100·(1 − transmissibility); negative is amplification."),
+    net_transmissibility: known("By the amplitude of the net force instead of the sum over the feet."),
     transmitted_force_n: known("The largest, zero to peak."),
     worst_speed_rpm: known("Running speed at which the transmissibility is largest."),
     margin: known("Target over achieved, the tightest of the targets."),
-    modes: z.array(Mode),
+    model: z
+      .enum(["vertical", "rigid_body"])
+      .meta({ description: "rigid_body where the geometry is known." }),
+    tilt_mrad: z.looseObject({ x: number, y: number }).nullable(),
+    modes: z.array(Mode).nullable(),
     price: number.nullable(),
     currency: z.string().nullable(),
     unbeaten: z.boolean().meta({

@@ -34,11 +34,12 @@ export function understand(body: SelectionBody): AskedSelection {
   const optional = <T>(value: T | undefined): T | null => value ?? null;
   const metres = (value: number | undefined): number | null =>
     value === undefined ? null : toSI(value, "length");
+  const machine = toMachine(normalised);
   return {
     normalised,
-    assumptions: [...machineAssumptions(body), ...selectionAssumptions(body)],
+    assumptions: [...machineAssumptions(body, machine), ...selectionAssumptions(body)],
     request: {
-      machine: toMachine(normalised),
+      machine,
       mounting: normalised.mounting,
       environment: {
         temperature: temperatureOf(environment.temperature),
@@ -49,6 +50,7 @@ export function understand(body: SelectionBody): AskedSelection {
         transmissibility: transmissibilityOf(target),
         transmittedForce:
           target.transmitted_force === undefined ? null : toSI(target.transmitted_force, "force"),
+        judgedOn: target.judged_on ?? "foot_sum",
       },
       limits: {
         families: optional(limits.families),

@@ -1,7 +1,8 @@
 import { type Isolator, staticDeflection, staticStiffness } from "../isolator/index.ts";
 import { type Excitation, forceOf, type Machine, norm, sensesOf } from "../machine/index.ts";
-import type { Analysis, FootState, SteadyState } from "./analysis.ts";
-import { footLoads } from "./foot-loads.ts";
+import type { Analysis, FootState, JudgedOn, Mode, SteadyState } from "./analysis.ts";
+import { footLoads, requireStanding } from "./foot-loads.ts";
+import { analyseRigid } from "./rigid/analyse.ts";
 import {
   dampingRatio,
   naturalFrequency,
@@ -17,13 +18,26 @@ const LOAD_TOLERANCE = 1e-12;
 const MAX_ITERATIONS = 60;
 
 /**
- * Everything an arrangement does under a machine, by the vertical model.
+ * Everything an arrangement does under a machine: by the rigid-body model where the machine's geometry is known,
+ * else by the vertical model.
  * @param machine    with as many feet as there are isolators
  * @param isolators  one a foot
+ * @param judgedOn   which sum of the foot forces is looked at for the worst
  * @returns          the analysis; loads that are not positive are reported as they are, for a gate to judge
- * @throws {InputError} a centre of gravity outside the feet
+ * @throws {InputError} a centre of gravity outside the feet that are not all captive
  */
-export function analyse(machine: Machine, isolators: readonly Isolator[]): Analysis {
+export function analyse(
+  machine: Machine,
+  isolators: readonly Isolator[],
+  judgedOn: JudgedOn = "foot_sum",
+): Analysis {
+  const { rigid, feet } = machine;
+  if (rigid === null || feet === null) return analyseVertical(machine, isolators);
+  if (!isolators.every((isolator) => isolator.captive)) requireStanding(machine);
+  return analyseRigid({ ...machine, rigid, feet }, isolators, judgedOn);
+}
+
+function analyseVertical(machine: Machine, isolators: readonly Isolator[]): Analysis {
   const loads = arrangementLoads(machine, isolators);
   const feet = isolators.map((isolator, i): FootState => {
     const load = loads[i] as number;
@@ -31,6 +45,7 @@ export function analyse(machine: Machine, isolators: readonly Isolator[]): Analy
       foot: i + 1,
       isolator,
       load,
+      lateralLoad: null,
       utilisation: load / isolator.load.max,
       staticDeflection: load > 0 ? staticDeflection(isolator, load) : 0,
     };
@@ -42,16 +57,39 @@ export function analyse(machine: Machine, isolators: readonly Isolator[]): Analy
   );
   const omega = naturalFrequency(model);
   const damping = dampingRatio(model, omega);
+  const { worst, worstForce } = worstSteadyStates(machine, model, omega);
+  const mode: Mode = {
+    omega,
+    dampingRatio: damping,
+    shape: "vertical",
+    energy: VERTICAL,
+    vector: VERTICAL,
+    ownTransmissibility: machine.orders.map(() =>
+      transmissibilityOf(model.mass, model.stiffnessAt(omega), omega),
+    ),
+  };
   return {
+    model: "vertical",
     feet,
     staticDeflection: deflections.reduce((s, d) => s + d, 0) / deflections.length,
     levelness: isolators.every(isLevelled) ? 0 : Math.max(...deflections) - Math.min(...deflections),
-    modes: [{ omega, dampingRatio: damping, shape: "vertical", energy: [0, 0, 1, 0, 0, 0] }],
+    tilt: null,
+    stability: null,
+    modes: [mode],
     naturalFrequency: omega,
     dampingRatio: damping,
-    ...worstSteadyStates(machine, model, omega),
+    steadyStates: [],
+    worst,
+    worstForce,
+    judged: {
+      transmissibility: worst?.transmissibility ?? null,
+      transmittedForce: worstForce?.transmittedForce ?? null,
+    },
+    rotation: null,
   };
 }
+
+const VERTICAL: readonly number[] = [0, 0, 1, 0, 0, 0];
 
 /** Levelled air springs hold their height whatever they carry. */
 function isLevelled(isolator: Isolator): boolean {
@@ -116,13 +154,22 @@ function worstSteadyStates(
     const transmissibility = (speed: number): number =>
       transmissibilityOf(model.mass, model.stiffnessAt(order * speed), order * speed);
     const force = (speed: number): number => transmissibility(speed) * (applied(speed) ?? 0);
-    const entry = (speed: number): SteadyState => ({
-      speed,
-      order,
-      omega: order * speed,
-      transmissibility: transmissibility(speed),
-      transmittedForce: applied(speed) === undefined ? null : force(speed),
-    });
+    const entry = (speed: number): SteadyState => {
+      const share = transmissibility(speed);
+      const transmitted = applied(speed) === undefined ? null : force(speed);
+      return {
+        speed,
+        order,
+        omega: order * speed,
+        transmissibility: share,
+        netTransmissibility: share,
+        transmittedForce: transmitted,
+        netForce: transmitted,
+        footForces: null,
+        machineVelocity: null,
+        pointVelocities: null,
+      };
+    };
 
     const resonance = [omega / order];
     const candidate = entry(worstOver(transmissibility, min, max, resonance).at);

@@ -23,8 +23,7 @@ export function footLoads(machine: Machine, stiffness?: readonly number[]): read
   const places = feet.map((foot) => foot.position);
   const [x0, y0] = centroid(places);
   const cg = machine.centreOfGravity ?? { x: x0, y: y0 };
-  if (!withinOutline(places, cg.x, cg.y))
-    throw InputError.at("/centre_of_gravity", "lies outside the outline of the feet: the machine would tip");
+  requireStanding(machine);
 
   const k = stiffness ?? new Array<number>(footCount).fill(1);
   const total = k.reduce((s, v) => s + v, 0);
@@ -45,4 +44,15 @@ export function footLoads(machine: Machine, stiffness?: readonly number[]): read
   const ax = (gx * yy - gy * xy) / det;
   const ay = (gy * xx - gx * xy) / det;
   return k.map((v, i) => (weight * v * (1 + ax * (dx[i] as number) + ay * (dy[i] as number))) / total);
+}
+
+/**
+ * Refuses a machine whose centre of gravity, base counted, lies outside the outline of its feet.
+ * @throws {InputError} at `/centre_of_gravity`
+ */
+export function requireStanding({ feet, centreOfGravity: cg }: Machine): void {
+  if (feet === null || cg === null) return;
+  const places = feet.map((foot) => foot.position);
+  if (!withinOutline(places, cg.x, cg.y))
+    throw InputError.at("/centre_of_gravity", "lies outside the outline of the feet: the machine would tip");
 }

@@ -1,5 +1,5 @@
 export { analyse, verticalForce } from "./analyse.ts";
-export type { Analysis, FootState, Mode, Shape, SteadyState } from "./analysis.ts";
+export type { Analysis, FootState, JudgedOn, Mode, PointVelocity, Shape, SteadyState } from "./analysis.ts";
 export { footLoads } from "./foot-loads.ts";
 export {
   type ComplexStiffness,

@@ -13,4 +13,4 @@ export {
   type Isolator,
 } from "./isolator.ts";
 export { type IsolatorRecord, isolatorFromRecord } from "./record.ts";
-export { staticDeflection, staticStiffness } from "./static.ts";
+export { staticDeflection, staticLoad, staticStiffness } from "./static.ts";

@@ -48,3 +48,20 @@ export function staticDeflection({ axial }: Isolator, load: number): number {
       return STANDARD_GRAVITY / (2 * Math.PI * axial.naturalFrequencyHz) ** 2;
   }
 }
+
+/**
+ * Static load along the axis at a deflection, the inverse of `staticDeflection`; a negative deflection pulls. A
+ * levelled air spring has no such law: its load is what its share of the weight makes it.
+ * @param deflection  m
+ * @returns           N
+ */
+export function staticLoad({ axial }: Isolator, deflection: number): number {
+  switch (axial.kind) {
+    case "linear":
+      return axial.stiffness * deflection;
+    case "curve":
+      return curveOf(axial.points).load(deflection);
+    case "air":
+      return Number.NaN;
+  }
+}

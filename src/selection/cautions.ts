@@ -16,7 +16,11 @@ export function cautionsFor(request: SelectionRequest): readonly string[] {
   const { machine, mounting } = request;
   const cautions: string[] = [];
   const { feet, centreOfGravity: cg } = machine;
-  if (feet !== null && cg !== null) {
+  if (feet !== null && machine.rigid === null)
+    cautions.push(
+      "The height of the centre of gravity is not known: how the machine tilts and rocks is not analysed. Give it, or the envelope.",
+    );
+  if (feet !== null && cg !== null && machine.rigid === null) {
     const places = feet.map((foot) => foot.position);
     const [x, y] = centroid(places);
     const span = Math.max(...places.flatMap((p) => places.map((q) => Math.hypot(p[0] - q[0], p[1] - q[1]))));

@@ -23,11 +23,11 @@ export interface Evaluated {
  * @throws {InputError} a centre of gravity outside the feet
  */
 export function evaluate(request: SelectionRequest, arrangement: Arrangement): Evaluated {
-  const analysis = analyse(request.machine, arrangement);
+  const analysis = analyse(request.machine, arrangement, request.target.judgedOn);
   const targets = targetChecks(request, analysis);
   const cost = priceOf(arrangement);
   const { levelness, staticDeflection, price } = request.limits;
-  const checks: Check[] = [...loadChecks(analysis.feet)];
+  const checks: Check[] = [...loadChecks(analysis.feet), ...stabilityChecks(analysis)];
   if (levelness !== null) checks.push(atMost("levelness", analysis.levelness, levelness));
   if (staticDeflection !== null)
     checks.push(atMost("static_deflection", analysis.staticDeflection, staticDeflection));
@@ -58,12 +58,26 @@ function loadChecks(feet: readonly FootState[]): readonly Check[] {
   ];
 }
 
-function targetChecks({ target }: SelectionRequest, { worst, worstForce }: Analysis): readonly Check[] {
+/** Whether the machine stands of itself: the rocking stiffness left is at least what gravity takes. */
+function stabilityChecks({ stability }: Analysis): readonly Check[] {
+  if (stability === null) return [];
+  const { stiffness, needed } = stability;
+  return [
+    {
+      gate: "stability",
+      value: stiffness,
+      limit: needed,
+      passed: stiffness !== null && stiffness > 0 && stiffness >= needed,
+    },
+  ];
+}
+
+function targetChecks({ target }: SelectionRequest, { judged }: Analysis): readonly Check[] {
   const checks: Check[] = [];
   if (target.transmissibility !== null)
-    checks.push(atMost("transmissibility", worst?.transmissibility ?? null, target.transmissibility));
+    checks.push(atMost("transmissibility", judged.transmissibility, target.transmissibility));
   if (target.transmittedForce !== null)
-    checks.push(atMost("transmitted_force", worstForce?.transmittedForce ?? null, target.transmittedForce));
+    checks.push(atMost("transmitted_force", judged.transmittedForce, target.transmittedForce));
   return checks;
 }
 
@@ -74,19 +88,28 @@ function marginOf(targets: readonly Check[]): number | null {
   return margins.includes(null) ? null : Math.min(...(margins as number[]));
 }
 
-/** At a fixed speed no mode may lie close to an excitation line; reports the nearest, as mode over line. */
+/**
+ * At a fixed speed no mode that amplifies what acts may lie close to an excitation line; reports the nearest such
+ * mode, as mode over line, or where none amplifies the nearest of all.
+ */
 function resonanceCheck({ machine }: SelectionRequest, { modes }: Analysis): Check {
   let nearest = Number.POSITIVE_INFINITY;
-  for (const { omega } of modes)
-    for (const order of machine.orders) {
+  let amplified = false;
+  for (const { omega, ownTransmissibility } of modes ?? [])
+    for (const [i, order] of machine.orders.entries()) {
       const ratio = omega / (order * machine.speed.max);
-      if (Math.abs(ratio - 1) < Math.abs(nearest - 1)) nearest = ratio;
+      const amplifies = (ownTransmissibility[i] ?? Number.POSITIVE_INFINITY) > 1;
+      const nearer = Math.abs(ratio - 1) < Math.abs(nearest - 1);
+      if (amplifies === amplified ? nearer : amplifies) {
+        nearest = ratio;
+        amplified = amplifies;
+      }
     }
   return {
     gate: "resonance",
-    value: nearest,
+    value: Number.isFinite(nearest) ? nearest : null,
     limit: nearest < 1 ? 1 - RESONANCE_BAND : 1 + RESONANCE_BAND,
-    passed: Math.abs(nearest - 1) >= RESONANCE_BAND,
+    passed: modes !== null && (!amplified || Math.abs(nearest - 1) >= RESONANCE_BAND),
   };
 }
 

@@ -11,6 +11,7 @@ export const GATES = [
   "underloaded",
   "overloaded",
   "uplift",
+  "stability",
   "levelness",
   "static_deflection",
   "transmissibility",

@@ -48,9 +48,7 @@ export function rank(passing: readonly Evaluated[], rankBy: Ranking | null, curr
 
 /** The force transmitted, or without an excitation the share of it. */
 function transmitted({ analysis }: Evaluated): number {
-  return (
-    analysis.worstForce?.transmittedForce ?? analysis.worst?.transmissibility ?? Number.POSITIVE_INFINITY
-  );
+  return analysis.judged.transmittedForce ?? analysis.judged.transmissibility ?? Number.POSITIVE_INFINITY;
 }
 
 function nameOf({ arrangement }: Evaluated): string {
@@ -79,7 +77,7 @@ function commonCurrency(passing: readonly Evaluated[]): string | null {
 function beatenOf(options: readonly Evaluated[], priced: Key): ReadonlySet<Evaluated> {
   const keys: readonly Key[] = [
     priced,
-    (option) => option.analysis.worst?.transmissibility ?? Number.POSITIVE_INFINITY,
+    (option) => option.analysis.judged.transmissibility ?? Number.POSITIVE_INFINITY,
     (option) => option.analysis.staticDeflection,
   ];
   const beats = (a: Evaluated, b: Evaluated): boolean =>

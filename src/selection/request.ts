@@ -1,3 +1,4 @@
+import type { JudgedOn } from "../dynamics/index.ts";
 import type { Exposure, Family } from "../isolator/index.ts";
 import type { Machine } from "../machine/index.ts";
 
@@ -15,6 +16,8 @@ export interface Target {
   readonly transmissibility: number | null;
   /** Largest transmitted force, N, zero to peak. */
   readonly transmittedForce: number | null;
+  /** Which sum of the foot forces the targets are judged on. */
+  readonly judgedOn: JudgedOn;
 }
 
 /** What the buyer or the site rules out; `null` is no limit. */

@@ -1,5 +1,6 @@
 import { footLoads } from "../dynamics/index.ts";
 import type { Isolator, IsolatorColumns } from "../isolator/index.ts";
+import type { Machine } from "../machine/index.ts";
 import { arrangements, equallyLoaded } from "./arrange.ts";
 import { type Evaluated, evaluate } from "./evaluate.ts";
 import { firstFailure, GATES, type Gate } from "./gates.ts";
@@ -44,7 +45,8 @@ export interface Selection {
 export function select(request: SelectionRequest, columns: IsolatorColumns): Selection {
   const { machine, limits } = request;
   const loads = footLoads(machine);
-  const lines = targetLines(request);
+  const asked = targetLines(request);
+  const lines = holdsVertically(machine) ? asked : [];
   const sites = siteGates(request);
   const { isolators } = columns;
 
@@ -80,7 +82,7 @@ export function select(request: SelectionRequest, columns: IsolatorColumns): Sel
   });
   const { options, rankedBy } = rank(passing, request.rankBy, limits.currency);
   return {
-    needed: neededFor(lines),
+    needed: neededFor(asked),
     counts: {
       examined: isolators.length,
       passing: used.size,
@@ -91,6 +93,14 @@ export function select(request: SelectionRequest, columns: IsolatorColumns): Sel
     options,
     nearMisses: nearMisses({ request, columns, rows: rejected, failed, sites, loads, lines }),
   };
+}
+
+/**
+ * Whether no isolator can do better than its vertical transmissibility: in the vertical model, and where all that
+ * acts is vertical, since the foot forces then sum to that at least.
+ */
+function holdsVertically({ rigid, excitations }: Machine): boolean {
+  return rigid === null || excitations.every((e) => e.kind === "force" && Math.abs(e.direction[2]) === 1);
 }
 
 function placeOf(gate: Gate): number {

@@ -61,7 +61,7 @@ export function request(overrides: Partial<SelectionRequest> = {}): SelectionReq
     machine: machine(),
     mounting: "floor",
     environment: { temperature: null, exposures: [], captive: false },
-    target: { transmissibility: 0.08, transmittedForce: null },
+    target: { transmissibility: 0.08, transmittedForce: null, judgedOn: "foot_sum" },
     limits: {
       families: null,
       price: null,

@@ -67,7 +67,7 @@ describe("a selection on feet known by number", () => {
   test("returns only isolators that meet the target when recomputed from their records", () => {
     fc.assert(
       fc.property(arbitraryCatalogue, arbitraryMachine, arbitraryTarget, (list, on, transmissibility) => {
-        const target = { transmissibility, transmittedForce: null };
+        const target = { transmissibility, transmittedForce: null, judgedOn: "foot_sum" as const };
         for (const option of select(request({ machine: on, target }), columnsOf(list)).options) {
           const [mount] = option.arrangement as [Isolator];
           const again = recomputed(mount, on);
@@ -82,7 +82,7 @@ describe("a selection on feet known by number", () => {
   test("leaves out no isolator that meets the target", () => {
     fc.assert(
       fc.property(arbitraryCatalogue, arbitraryMachine, arbitraryTarget, (list, on, transmissibility) => {
-        const target = { transmissibility, transmittedForce: null };
+        const target = { transmissibility, transmittedForce: null, judgedOn: "foot_sum" as const };
         const { options } = select(request({ machine: on, target }), columnsOf(list));
         const found = options.map((option) => option.arrangement[0]?.designation).sort();
         const expected = list
@@ -183,8 +183,16 @@ describe("an isolator is rejected at its first gate", () => {
     ["underloaded", { load: { min: 2200, max: 2500, rated: 2500 } }, request()],
     ["overloaded", { load: { min: 500, max: 2000, rated: 2000 } }, request()],
     ["static_deflection", {}, request({ limits: { ...limits, staticDeflection: 0.02 } })],
-    ["transmissibility", {}, request({ target: { transmissibility: 0.01, transmittedForce: null } })],
-    ["transmissibility", {}, request({ target: { transmissibility: 0.01, transmittedForce: null } })],
+    [
+      "transmissibility",
+      {},
+      request({ target: { transmissibility: 0.01, transmittedForce: null, judgedOn: "foot_sum" as const } }),
+    ],
+    [
+      "transmissibility",
+      {},
+      request({ target: { transmissibility: 0.01, transmittedForce: null, judgedOn: "foot_sum" as const } }),
+    ],
     [
       "transmitted_force",
       {},
@@ -194,7 +202,7 @@ describe("an isolator is rejected at its first gate", () => {
             { kind: "force", amplitude: 350, direction: [0, 0, 1], order: 1, phase: 0, at: null },
           ],
         }),
-        target: { transmissibility: 0.5, transmittedForce: 1 },
+        target: { transmissibility: 0.5, transmittedForce: 1, judgedOn: "foot_sum" },
       }),
     ],
     // 2084 N a foot on 3.2 MN/m is 19.6 Hz, at 1180 rpm = 19.7 Hz; damping of a half lets the target pass first.
@@ -204,7 +212,7 @@ describe("an isolator is rejected at its first gate", () => {
         axial: { kind: "linear" as const, stiffness: 3.2e6 },
         damping: { kind: "viscous" as const, ratio: 0.5 },
       },
-      request({ target: { transmissibility: 2, transmittedForce: null } }),
+      request({ target: { transmissibility: 2, transmittedForce: null, judgedOn: "foot_sum" as const } }),
     ],
   ])("%s", (gate, mount, ask) => {
     expect(gateOf(mount, ask)).toBe(gate);
