@@ -1,5 +1,5 @@
 import type { FootState, Mode } from "../../src/dynamics/index.ts";
-import type { NearMiss, Option, SelectionRequest } from "../../src/selection/index.ts";
+import type { Check, Gate, NearMiss, Option, SelectionRequest } from "../../src/selection/index.ts";
 import { inUnit } from "../../src/units/index.ts";
 import { finite } from "./number.ts";
 
@@ -119,17 +119,34 @@ const GATE_UNITS = {
 const PLAIN_UNITS: Readonly<Record<string, string>> = {
   lead_time: "days",
   resonance: "mode over excitation frequency",
+  stability: "N·m/rad",
 };
+
+/** A number of a gate in the unit in which it is shown. */
+function shownFor(gate: Gate, si: number): number {
+  return gate in GATE_UNITS ? inUnit(si, GATE_UNITS[gate as keyof typeof GATE_UNITS]) : si;
+}
+
+function unitFor(gate: Gate): string | null {
+  return gate in GATE_UNITS ? GATE_UNITS[gate as keyof typeof GATE_UNITS] : (PLAIN_UNITS[gate] ?? null);
+}
 
 /** A near miss as JSON, its numbers in the unit it names. */
 export function presentNearMiss({ designation, gate, value, limit }: NearMiss) {
-  const unit = gate in GATE_UNITS ? GATE_UNITS[gate as keyof typeof GATE_UNITS] : null;
-  const shown = (si: number): number => (unit === null ? si : inUnit(si, unit));
   return {
     designation,
     gate,
-    value: shown(value),
-    limit: shown(limit),
-    unit: unit ?? PLAIN_UNITS[gate] ?? null,
+    value: shownFor(gate, value),
+    limit: shownFor(gate, limit),
+    unit: unitFor(gate),
   };
+}
+
+/** A check as JSON, its numbers in the unit it names. */
+export function presentCheck({ gate, passed, value, limit }: Check) {
+  const shown = (si: number | null): number | null => {
+    const known = finite(si);
+    return known === null ? null : shownFor(gate, known);
+  };
+  return { gate, passed, value: shown(value), limit: shown(limit), unit: unitFor(gate) };
 }

@@ -1,4 +1,6 @@
 import type { Route } from "../route.ts";
+import { criteriaRoutes } from "./criteria.ts";
+import { evaluationRoutes } from "./evaluations.ts";
 import { healthRoutes } from "./health.ts";
 import { isolatorRoutes } from "./isolators.ts";
 import { openapiRoutes } from "./openapi.ts";
@@ -10,8 +12,10 @@ import { sheetRoutes } from "./sheet.ts";
 /** Every route of the service: what the application mounts and what the OpenAPI document describes. */
 export const routes: readonly Route[] = [
   ...selectionRoutes,
+  ...evaluationRoutes,
   ...sheetRoutes,
   ...isolatorRoutes,
+  ...criteriaRoutes,
   ...pageRoutes,
   ...openapiRoutes,
   ...referenceRoutes,

@@ -3,11 +3,11 @@ import { FAMILIES } from "../../src/isolator/index.ts";
 import { GATES, RANKINGS } from "../../src/selection/index.ts";
 import { SelectionBody } from "./selection.ts";
 
-const number = z.number();
-const known = (description: string) =>
+export const number = z.number();
+export const known = (description: string) =>
   number.nullable().meta({ description: `${description} Null when it was not computed; see notes.` });
 
-const Foot = z.looseObject({
+export const Foot = z.looseObject({
   foot: z.int().meta({ description: "Foot number, from 1." }),
   isolator: z.string(),
   load_n: number,
@@ -16,7 +16,7 @@ const Foot = z.looseObject({
   lateral_load_n: number.nullable().meta({ description: "Across the axis; null for an upright isolator." }),
 });
 
-const Mode = z.looseObject({
+export const Mode = z.looseObject({
   frequency_hz: number,
   damping_ratio: number,
   shape: z.enum(["along_x", "along_y", "vertical", "roll", "pitch", "yaw"]),

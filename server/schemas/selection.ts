@@ -18,7 +18,7 @@ const environment = z.strictObject({
   captive: z.boolean().optional().meta({ description: "Whether every isolator must be captive." }),
 });
 
-const target = z
+export const target = z
   .strictObject({
     transmissibility: z.number().gt(0).max(1000).optional(),
     isolation_efficiency: z.number().min(0).lt(100).optional().meta({ description: "Per cent." }),

@@ -46,12 +46,7 @@ export function understand(body: SelectionBody): AskedSelection {
         exposures: environment.exposures ?? [],
         captive: environment.captive ?? false,
       },
-      target: {
-        transmissibility: transmissibilityOf(target),
-        transmittedForce:
-          target.transmitted_force === undefined ? null : toSI(target.transmitted_force, "force"),
-        judgedOn: target.judged_on ?? "foot_sum",
-      },
+      target: toTarget(target),
       limits: {
         families: optional(limits.families),
         price: optional(limits.price),
@@ -64,6 +59,15 @@ export function understand(body: SelectionBody): AskedSelection {
       },
       rankBy: optional(body.rank_by),
     },
+  };
+}
+
+/** The targets of a request in SI units. */
+export function toTarget(target: Target): SelectionRequest["target"] {
+  return {
+    transmissibility: transmissibilityOf(target),
+    transmittedForce: target.transmitted_force === undefined ? null : toSI(target.transmitted_force, "force"),
+    judgedOn: target.judged_on ?? "foot_sum",
   };
 }
 

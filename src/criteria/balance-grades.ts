@@ -1,3 +1,5 @@
+import type { Source } from "./source.ts";
+
 /** A balance grade of ISO 21940-11, in our words. */
 export interface BalanceGrade {
   /** mm/s, as the grade is named. */
@@ -28,6 +30,12 @@ export const BALANCE_GRADES: readonly BalanceGrade[] = [
   { grade: 1, machines: "grinding-machine drives; audio and video drives" },
   { grade: 0.4, machines: "gyroscopes and high-precision spindles" },
 ];
+
+export const BALANCE_GRADES_SOURCE: Source = {
+  title: "ISO 21940-11, balance quality grades for rotors in a constant (rigid) state",
+  mark: "published",
+  note: "As summaries of the standard agree; the descriptions are in our words.",
+};
 
 export type ParsedGrade =
   /** m/s */

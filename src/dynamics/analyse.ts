@@ -1,8 +1,8 @@
 import { type Isolator, staticDeflection, staticStiffness } from "../isolator/index.ts";
-import { type Excitation, forceOf, type Machine, norm, sensesOf } from "../machine/index.ts";
+import { type Excitation, forceOf, type Machine, norm, type Sense, sensesOf } from "../machine/index.ts";
 import type { Analysis, FootState, JudgedOn, Mode, SteadyState } from "./analysis.ts";
 import { footLoads, requireStanding } from "./foot-loads.ts";
-import { analyseRigid } from "./rigid/analyse.ts";
+import { analyseRigid, type FrequencyResponse, responseOf } from "./rigid/analyse.ts";
 import {
   dampingRatio,
   naturalFrequency,
@@ -35,6 +35,32 @@ export function analyse(
   if (rigid === null || feet === null) return analyseVertical(machine, isolators);
   if (!isolators.every((isolator) => isolator.captive)) requireStanding(machine);
   return analyseRigid({ ...machine, rigid, feet }, isolators, judgedOn);
+}
+
+/**
+ * Transmissibility of an arrangement against frequency, for what acts at order 1 or a vertical force through the
+ * centre of gravity.
+ * @param rotation     sense of the shaft, as the analysis reports it
+ * @param frequencies  rad/s, ascending
+ */
+export function frequencyCurve(
+  machine: Machine,
+  isolators: readonly Isolator[],
+  rotation: Sense | null,
+  frequencies: Float64Array,
+): FrequencyResponse {
+  const { rigid, feet } = machine;
+  if (rigid !== null && feet !== null)
+    return responseOf({ ...machine, rigid, feet }, isolators, rotation ?? 1, frequencies);
+  const loads = arrangementLoads(machine, isolators);
+  const model = verticalModel(
+    machine.mass,
+    isolators.map((isolator, i) => ({ isolator, load: Math.max(loads[i] as number, 0) })),
+  );
+  const transmissibility = frequencies.map((omega) =>
+    transmissibilityOf(model.mass, model.stiffnessAt(omega), omega),
+  );
+  return { transmissibility, net: transmissibility };
 }
 
 function analyseVertical(machine: Machine, isolators: readonly Isolator[]): Analysis {

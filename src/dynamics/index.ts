@@ -1,4 +1,4 @@
-export { analyse, verticalForce } from "./analyse.ts";
+export { analyse, frequencyCurve, verticalForce } from "./analyse.ts";
 export type { Analysis, FootState, JudgedOn, Mode, PointVelocity, Shape, SteadyState } from "./analysis.ts";
 export { footLoads } from "./foot-loads.ts";
 export {

@@ -66,7 +66,8 @@ export function curveThrough(points: readonly CurvePoint[]): Curve {
     load: (deflection) => evaluate(deflection).load,
     tangent: (deflection) => evaluate(deflection).tangent,
     deflection(load) {
-      if (load === at(y, last)) return at(x, last);
+      // Rounding above the last load is the last point, also where the curve ends flat.
+      if (load >= at(y, last) && load <= at(y, last) * (1 + TOLERANCE)) return at(x, last);
       if (load <= at(y, 0))
         return load === at(y, 0) ? at(x, 0) : at(x, 0) + (load - at(y, 0)) / at(slopes, 0);
       if (load > at(y, last)) return at(x, last) + (load - at(y, last)) / at(slopes, last);

@@ -12,8 +12,10 @@ const STANDING = [
 const OFF_CENTRE = 0.05;
 
 /** What the user of an answer must know beside its numbers, most general last. */
-export function cautionsFor(request: SelectionRequest): readonly string[] {
-  const { machine, mounting } = request;
+export function cautionsFor({
+  machine,
+  mounting,
+}: Pick<SelectionRequest, "machine" | "mounting">): readonly string[] {
   const cautions: string[] = [];
   const { feet, centreOfGravity: cg } = machine;
   if (feet !== null && machine.rigid === null)

@@ -37,6 +37,20 @@ export function evaluate(request: SelectionRequest, arrangement: Arrangement): E
   return { arrangement, analysis, checks, margin: marginOf(targets), ...cost };
 }
 
+/** A machine and what must hold: what an arrangement is judged by, without catalogue, limits or ranking. */
+export type EvaluationRequest = Pick<SelectionRequest, "machine" | "target">;
+
+/** The checks of a stated arrangement, in the order of the gates. */
+export function judge(request: EvaluationRequest, analysis: Analysis): readonly Check[] {
+  const { min, max } = request.machine.speed;
+  return [
+    ...loadChecks(analysis.feet),
+    ...stabilityChecks(analysis),
+    ...targetChecks(request, analysis),
+    ...(min === max ? [resonanceCheck(request, analysis)] : []),
+  ];
+}
+
 /** A value that must not exceed a limit; one that is not known fails. */
 function atMost(gate: Gate, value: number | null, limit: number): Check {
   return { gate, value, limit, passed: value !== null && value <= limit };
@@ -72,7 +86,7 @@ function stabilityChecks({ stability }: Analysis): readonly Check[] {
   ];
 }
 
-function targetChecks({ target }: SelectionRequest, { judged }: Analysis): readonly Check[] {
+function targetChecks({ target }: EvaluationRequest, { judged }: Analysis): readonly Check[] {
   const checks: Check[] = [];
   if (target.transmissibility !== null)
     checks.push(atMost("transmissibility", judged.transmissibility, target.transmissibility));
@@ -92,7 +106,7 @@ function marginOf(targets: readonly Check[]): number | null {
  * At a fixed speed no mode that amplifies what acts may lie close to an excitation line; reports the nearest such
  * mode, as mode over line, or where none amplifies the nearest of all.
  */
-function resonanceCheck({ machine }: SelectionRequest, { modes }: Analysis): Check {
+function resonanceCheck({ machine }: EvaluationRequest, { modes }: Analysis): Check {
   let nearest = Number.POSITIVE_INFINITY;
   let amplified = false;
   for (const { omega, ownTransmissibility } of modes ?? [])

@@ -1,6 +1,6 @@
 export type { Arrangement } from "./arrange.ts";
 export { cautionsFor } from "./cautions.ts";
-export type { Evaluated } from "./evaluate.ts";
+export { type Evaluated, type EvaluationRequest, judge } from "./evaluate.ts";
 export { type Check, GATES, type Gate } from "./gates.ts";
 export type { NearMiss } from "./near-misses.ts";
 export type { Needed } from "./needed.ts";

@@ -144,11 +144,12 @@ describe("a load–deflection curve", () => {
           return [x, y] as const;
         });
         const through = curveThrough(points);
-        let before = Number.NEGATIVE_INFINITY;
+        let before = 0;
         for (let i = 0; i <= 200; i++) {
           const d = (x * i) / 180;
           const load = through.load(d);
-          expect(load).toBeGreaterThanOrEqual(before);
+          // A curve that ends flat is flat to rounding.
+          expect(load).toBeGreaterThanOrEqual(before * (1 - 1e-14));
           before = load;
           if (i > 0 && i <= 180)
             expectClose(through.load(through.deflection(load)), load, {

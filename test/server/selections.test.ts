@@ -444,6 +444,85 @@ describe("bad input", () => {
   });
 });
 
+describe("a machine of known geometry", () => {
+  const FAN = {
+    ...SMALLEST,
+    feet: { count: 4, length: "1.2 m", width: "0.9 m" },
+    centre_of_gravity: { x: "0.1 m", y: 0, z: "0.5 m" },
+    envelope: { length: "1.4 m", width: "1 m", height: "1 m" },
+    target: { transmissibility: 0.15 },
+  };
+
+  test("is analysed as a rigid body: six modes, tilt, and the feet's own loads", async () => {
+    const { options, cautions, counts } = await select({
+      ...FAN,
+      excitation: [
+        { kind: "unbalance", rotor_mass: "120 kg", grade: "G6.3", at: { x: 0, y: 0, z: "0.6 m" } },
+      ],
+    });
+    expect(options.length).toBeGreaterThan(0);
+    expect(counts.passing).toBeGreaterThan(0);
+    for (const option of options) {
+      expect(option.model).toBe("rigid_body");
+      expect(option.modes).toHaveLength(6);
+      expect(option.transmissibility).toBeLessThanOrEqual(0.15);
+      expect(option.transmissibility).toBeGreaterThanOrEqual(option.net_transmissibility * (1 - 1e-9));
+      expectClose(
+        option.feet.reduce((s: number, f: { load_n: number }) => s + f.load_n, 0),
+        850 * 9.80665,
+        { rtol: 1e-9, because: "balance of forces" },
+      );
+    }
+    expect(cautions.join(" ")).not.toContain("vertical model");
+  });
+
+  test("weighs with its base, and an inertia base by mass alone leaves the vertical model", async () => {
+    const weight = (answer: { options: { feet: { load_n: number }[] }[] }): number =>
+      (answer.options[0]?.feet ?? []).reduce((s, f) => s + f.load_n, 0) / 9.80665;
+    const slab = await select({
+      ...FAN,
+      base: { kind: "inertia", length: "1.5 m", width: "1.1 m", thickness: "0.2 m" },
+    });
+    expectClose(weight(slab), 850 + 2400 * 1.5 * 1.1 * 0.2, {
+      rtol: 1e-9,
+      because: "density of concrete, common practice",
+    });
+    const mass = await select({ ...FAN, base: { mass: "500 kg" } });
+    expectClose(weight(mass), 1350, { rtol: 1e-9, because: "sum of masses" });
+    expect(mass.options[0].model).toBe("vertical");
+  });
+
+  test.each([
+    ["an impossible tensor", { inertia: { xx: 1, yy: 1, zz: 5 } }, "/inertia"],
+    ["half a base", { base: { length: 1, width: 1 } }, "/base"],
+    ["a base of nothing", { base: {} }, "/base"],
+    [
+      "an isolator pointing nowhere",
+      { feet: { positions: [0, 1, 2].map((x) => ({ x, y: x * x, axis: [0, 0, 0] })) } },
+      "/feet/positions/0/axis",
+    ],
+    [
+      "feet in one place",
+      {
+        feet: {
+          positions: [
+            { x: 0, y: 0 },
+            { x: 0, y: 0 },
+            { x: 1, y: 1 },
+          ],
+        },
+      },
+      "/feet/positions/1",
+    ],
+  ])("%s is refused", async (_, change, pointer) => {
+    const { status, body } = await api
+      .post("/v1/selections")
+      .send({ ...FAN, centre_of_gravity: { x: 0.5, y: 0.4, z: 0.5 }, ...change });
+    expect(status).toBe(422);
+    expect(body.errors[0].pointer).toBe(pointer);
+  });
+});
+
 describe("excitation", () => {
   test("adds forces of one order as phasors", async () => {
     const ask = (phase_deg: number) =>

@@ -224,6 +224,22 @@ function withOwnTransmissibility(
   };
 }
 
+/** Transmissibility of an arrangement against frequency, rad/s, in a sense of rotation. */
+export function responseOf(
+  { rigid: body, feet, ...rest }: RigidMachine,
+  isolators: readonly Isolator[],
+  sense: Sense,
+  frequencies: Float64Array,
+): FrequencyResponse {
+  const model = rigidModel(body, feet, isolators, equilibrium(body, feet, isolators));
+  return frequencyResponse(model, { ...rest, rigid: body, feet }, sense, frequencies);
+}
+
+export interface FrequencyResponse {
+  readonly transmissibility: Float64Array;
+  readonly net: Float64Array;
+}
+
 /**
  * Transmissibility against frequency for what acts at order 1, or a vertical unit force through the centre of
  * gravity.
@@ -234,7 +250,7 @@ export function frequencyResponse(
   machine: Machine,
   sense: Sense,
   frequencies: Float64Array,
-): { readonly transmissibility: Float64Array; readonly net: Float64Array } {
+): FrequencyResponse {
   const transmissibility = new Float64Array(frequencies.length);
   const net = new Float64Array(frequencies.length);
   const mixed = growth(machine, 1) === "mixed";
