@@ -3,11 +3,8 @@ export type { Analysis, FootState, JudgedOn, Mode, PointVelocity, Shape, SteadyS
 export { footLoads } from "./foot-loads.ts";
 export {
   type ComplexStiffness,
-  dampingRatio,
   type Mount,
-  naturalFrequency,
   transmissibilityOf,
   type VerticalModel,
-  verticalModel,
 } from "./vertical.ts";
 export { type Maximum, worstOver } from "./worst.ts";

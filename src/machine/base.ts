@@ -2,7 +2,7 @@ import { boxInertia, type RigidBody } from "./rigid-body.ts";
 import type { Vec3 } from "./vector.ts";
 
 /** Density of what inertia bases are made of, kg/m³ (common practice for normal concrete and structural steel). */
-export const BASE_DENSITY = { concrete: 2400, steel: 7850 } as const;
+const BASE_DENSITY = { concrete: 2400, steel: 7850 } as const;
 
 export type BaseMaterial = keyof typeof BASE_DENSITY;
 

@@ -1,4 +1,4 @@
-export { BASE_DENSITY, type BaseMaterial, type Slab, slabBody, slabMass } from "./base.ts";
+export { type BaseMaterial, type Slab, slabBody, slabMass } from "./base.ts";
 export {
   type Excitation,
   type ForceExcitation,

@@ -169,7 +169,7 @@ function forceOver(
 }
 
 /** The steady state at one order of one speed, whole. */
-export function steadyState(
+function steadyState(
   model: RigidModel,
   machine: Machine,
   order: number,

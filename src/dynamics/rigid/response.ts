@@ -145,27 +145,30 @@ export function respond(model: RigidModel, load: Load, omega: number, amplitudes
   const p5i = pIm[5] as number;
   for (let foot = 0; foot < feet.length; foot++) {
     const b = (feet[foot] as (typeof feet)[number]).force;
-    const dot = (
-      row: number,
-      x0: number,
-      x1: number,
-      x2: number,
-      x3: number,
-      x4: number,
-      x5: number,
-    ): number =>
-      (b[row] as number) * x0 +
-      (b[row + 1] as number) * x1 +
-      (b[row + 2] as number) * x2 +
-      (b[row + 3] as number) * x3 +
-      (b[row + 4] as number) * x4 +
-      (b[row + 5] as number) * x5;
-    const xr = dot(0, p0r, p1r, p2r, p3r, p4r, p5r);
-    const xi = dot(0, p0i, p1i, p2i, p3i, p4i, p5i);
-    const yr = dot(6, p0r, p1r, p2r, p3r, p4r, p5r);
-    const yi = dot(6, p0i, p1i, p2i, p3i, p4i, p5i);
-    const zr = dot(12, p0r, p1r, p2r, p3r, p4r, p5r);
-    const zi = dot(12, p0i, p1i, p2i, p3i, p4i, p5i);
+    const x0 = b[0] as number;
+    const x1 = b[1] as number;
+    const x2 = b[2] as number;
+    const x3 = b[3] as number;
+    const x4 = b[4] as number;
+    const x5 = b[5] as number;
+    const xr = x0 * p0r + x1 * p1r + x2 * p2r + x3 * p3r + x4 * p4r + x5 * p5r;
+    const xi = x0 * p0i + x1 * p1i + x2 * p2i + x3 * p3i + x4 * p4i + x5 * p5i;
+    const y0 = b[6] as number;
+    const y1 = b[7] as number;
+    const y2 = b[8] as number;
+    const y3 = b[9] as number;
+    const y4 = b[10] as number;
+    const y5 = b[11] as number;
+    const yr = y0 * p0r + y1 * p1r + y2 * p2r + y3 * p3r + y4 * p4r + y5 * p5r;
+    const yi = y0 * p0i + y1 * p1i + y2 * p2i + y3 * p3i + y4 * p4i + y5 * p5i;
+    const z0 = b[12] as number;
+    const z1 = b[13] as number;
+    const z2 = b[14] as number;
+    const z3 = b[15] as number;
+    const z4 = b[16] as number;
+    const z5 = b[17] as number;
+    const zr = z0 * p0r + z1 * p1r + z2 * p2r + z3 * p3r + z4 * p4r + z5 * p5r;
+    const zi = z0 * p0i + z1 * p1i + z2 * p2i + z3 * p3i + z4 * p4i + z5 * p5i;
     const sr = footK[foot] as number;
     const si = (footH[foot] as number) + omega * (footC[foot] as number);
     const force = Math.sqrt(sr * sr + si * si) * amplitude(xr, xi, yr, yi, zr, zi);

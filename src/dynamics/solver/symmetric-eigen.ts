@@ -1,5 +1,6 @@
 const N = 6;
 const MAX_SWEEPS = 60;
+/** Under this share of the whole an entry is nothing; above it no square here overflows. */
 const TINY = 1e-60;
 
 /** Eigenvalues ascending, and orthonormal eigenvectors: vector n holds entries 6n to 6n + 5. */
@@ -113,7 +114,7 @@ function implicitQl(v: Float64Array, d: Float64Array, e: Float64Array): void {
     for (let sweep = 0; m > l && sweep < MAX_SWEEPS; sweep++) {
       let g = d[l] as number;
       let p = ((d[l + 1] as number) - g) / (2 * (e[l] as number));
-      let r = p < 0 ? -Math.hypot(p, 1) : Math.hypot(p, 1);
+      let r = p < 0 ? -Math.sqrt(p * p + 1) : Math.sqrt(p * p + 1);
       d[l] = (e[l] as number) / (p + r);
       d[l + 1] = (e[l] as number) * (p + r);
       const dl1 = d[l + 1] as number;
