@@ -16,7 +16,7 @@ export interface Eigen6 {
  */
 export function symmetricEigen6(matrix: Float64Array): Eigen6 {
   // Columns of `v` become the eigenvectors; it is kept by rows.
-  const v = Float64Array.from(matrix);
+  const v = matrix.slice();
   const d = new Float64Array(N);
   const e = new Float64Array(N);
   tridiagonalise(v, d, e);
@@ -158,13 +158,15 @@ function implicitQl(v: Float64Array, d: Float64Array, e: Float64Array): void {
 }
 
 function sortedAscending(v: Float64Array, d: Float64Array): Eigen6 {
-  const order = [0, 1, 2, 3, 4, 5].sort((a, b) => (d[a] as number) - (d[b] as number));
   const values = new Float64Array(N);
   const vectors = new Float64Array(N * N);
-  for (let n = 0; n < N; n++) {
-    const column = order[n] as number;
-    values[n] = d[column] as number;
-    for (let i = 0; i < N; i++) vectors[n * N + i] = v[i * N + column] as number;
+  for (let column = 0; column < N; column++) {
+    // Its place is the number of smaller values, and of equal ones before it.
+    let place = 0;
+    for (let other = 0; other < N; other++)
+      if ((d[other] as number) < (d[column] as number) || (d[other] === d[column] && other < column)) place++;
+    values[place] = d[column] as number;
+    for (let i = 0; i < N; i++) vectors[place * N + i] = v[i * N + column] as number;
   }
   return { values, vectors };
 }

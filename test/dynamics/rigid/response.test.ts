@@ -115,6 +115,39 @@ describe("nothing changes", () => {
     expectAllClose(numbers({ ...on, excitations }, SPRINGS), before, invariant);
   });
 
+  test("when the frame turns about z by any angle, forces and all", () => {
+    const pushed = fan(BODY, uprightFeet(PLACES), {
+      orders: [1],
+      excitations: [
+        { kind: "force", amplitude: 60, direction: [0.6, 0, 0.8], order: 1, phase: 0, at: [0.2, 0.1, 0.7] },
+      ],
+    });
+    const still = numbers(pushed, SPRINGS);
+    fc.assert(
+      fc.property(fc.double({ min: 0, max: 6.28, noNaN: true }), (angle) => {
+        const c = Math.cos(angle);
+        const s = Math.sin(angle);
+        const turn = ([x, y, z]: Vec3): Vec3 => [c * x - s * y, s * x + c * y, z];
+        const { xx, yy, zz, xy, xz, yz } = BODY.inertia;
+        const inertia = {
+          xx: c * c * xx - 2 * s * c * xy + s * s * yy,
+          yy: s * s * xx + 2 * s * c * xy + c * c * yy,
+          zz,
+          xy: s * c * (xx - yy) + (c * c - s * s) * xy,
+          xz: c * xz - s * yz,
+          yz: s * xz + c * yz,
+        };
+        const body = { ...BODY, inertia, centreOfGravity: turn(BODY.centreOfGravity) };
+        const excitations = pushed.excitations.map((e) =>
+          e.kind === "force" ? { ...e, direction: turn(e.direction), at: e.at && turn(e.at) } : e,
+        );
+        const on = fan(body, uprightFeet(PLACES.map(turn)), { orders: [1], excitations });
+        expectAllClose(numbers(on, SPRINGS), still, invariant);
+      }),
+      { numRuns: 30 },
+    );
+  });
+
   test("when the feet are numbered otherwise", () => {
     const order = [2, 0, 3, 1];
     const on = fan(BODY, uprightFeet(order.map((i) => PLACES[i] as Vec3)));
@@ -308,6 +341,34 @@ describe("a rigid body on its isolators", () => {
     expect(worstForce?.transmissibility).toBeNull();
     expect(worstForce?.transmittedForce).toBeGreaterThan(0);
   });
+});
+
+test("isolators inclined by θ in pairs hold the vertical with k(cos²θ + λ·sin²θ) each, and bear loads along their axes", () => {
+  const angle = Math.PI / 6;
+  const body: RigidBody = { mass: 800, centreOfGravity: [0, 0, 0], inertia: boxInertia(800, 1.4, 1, 0.8) };
+  const inclined = PLACES.map(
+    ([x, y]): Foot => ({
+      position: [x, y, 0],
+      axis: [0, -Math.sign(y) * Math.sin(angle), Math.cos(angle)],
+    }),
+  );
+  const springs = PLACES.map(() =>
+    isolator({
+      axial: { kind: "linear", stiffness: 90e3 },
+      lateralRatio: 0.4,
+      load: { min: 0, max: 5000, rated: 2500 },
+    }),
+  );
+  const { modes, feet } = analyse(fan(body, inclined, { excitations: [], orders: [1] }), springs);
+  const stiffness = 4 * 90e3 * (Math.cos(angle) ** 2 + 0.4 * Math.sin(angle) ** 2);
+  const vertical = modes?.find(({ shape }) => shape === "vertical");
+  expectClose(vertical?.omega as number, Math.sqrt(stiffness / 800), invariant);
+  for (const { load, lateralLoad } of feet) {
+    // Pressed down by d, a foot gives k·d·cosθ along its axis and λ·k·d·sinθ across it.
+    const d = (800 * 9.80665) / stiffness;
+    expectClose(load, 90e3 * d * Math.cos(angle), invariant);
+    expectClose(lateralLoad as number, 0.4 * 90e3 * d * Math.sin(angle), invariant);
+  }
 });
 
 test("far above resonance a rotor of 200 kg at G 6.3 on 800 kg moves it with 1.575 mm/s peak (ISO 21940-11; computed)", () => {
