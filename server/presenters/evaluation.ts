@@ -3,7 +3,7 @@ import type { Check } from "../../src/selection/index.ts";
 import { inUnit } from "../../src/units/index.ts";
 import type { AskedEvaluation } from "../schemas/to-evaluation.ts";
 import { finite } from "./number.ts";
-import { presentCheck, presentFoot, presentMode } from "./option.ts";
+import { NET_NOTE, netDiffers, presentCheck, presentFoot, presentMode } from "./option.ts";
 
 /** A response curve, rad/s against ratios. */
 export interface Curve {
@@ -72,8 +72,9 @@ function millimetres(velocity: number | null): number | null {
   return known === null ? null : inUnit(known, "mm/s");
 }
 
-/** Why what is null was not computed. */
-function notesOf({ model, modes, worst, worstForce }: Analysis): readonly string[] {
+/** Why what is null was not computed, and what the numbers do not say. */
+function notesOf(analysis: Analysis): readonly string[] {
+  const { model, modes, worst, worstForce } = analysis;
   const reasons: [boolean, string][] = [
     [
       model === "vertical",
@@ -88,6 +89,7 @@ function notesOf({ model, modes, worst, worstForce }: Analysis): readonly string
       "worst: no resultant force acts that a transmissibility could be told of.",
     ],
     [modes !== null && worstForce === null, "worst_force: no excitation is stated."],
+    [netDiffers(analysis), NET_NOTE],
   ];
   return reasons.filter(([holds]) => holds).map(([, text]) => text);
 }

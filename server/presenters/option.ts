@@ -1,4 +1,4 @@
-import type { FootState, Mode } from "../../src/dynamics/index.ts";
+import type { Analysis, FootState, Mode } from "../../src/dynamics/index.ts";
 import type { Check, Gate, NearMiss, Option, SelectionRequest } from "../../src/selection/index.ts";
 import { inUnit } from "../../src/units/index.ts";
 import { finite } from "./number.ts";
@@ -70,6 +70,15 @@ export function presentMode({ omega, dampingRatio, shape, energy, vector }: Mode
 /** How far the foot sum may be above the net value before a note says so. */
 const NET_DIFFERS = 1.5;
 
+export const NET_NOTE =
+  "The feet push against one another: the sum of their forces is well above the net force.";
+
+/** Whether the foot sum and the net value at the worst tell different stories. */
+export function netDiffers({ worst }: Analysis): boolean {
+  const { transmissibility, netTransmissibility } = worst ?? {};
+  return (transmissibility ?? 0) > NET_DIFFERS * (netTransmissibility ?? Number.POSITIVE_INFINITY);
+}
+
 /** What the numbers of one option do not say, the reason of every null among them. */
 function notesOf(
   { analysis, arrangement, price }: Option,
@@ -85,9 +94,7 @@ function notesOf(
   else if (finite(analysis.worst.transmissibility) === null)
     notes.push("transmissibility: an undamped natural frequency is met exactly; no bound can be given.");
   if (analysis.modes === null) notes.push("modes: nothing holds the machine in every direction.");
-  const { worst } = analysis;
-  if ((worst?.transmissibility ?? 0) > NET_DIFFERS * (worst?.netTransmissibility ?? Number.POSITIVE_INFINITY))
-    notes.push("The feet push against one another: the sum of their forces is well above the net force.");
+  if (netDiffers(analysis)) notes.push(NET_NOTE);
   if (machine.excitations.length === 0) notes.push("transmitted_force_n: no excitation is stated.");
   if (price === null) notes.push("price: not every isolator is priced in one currency.");
   if (environment.temperature !== null && arrangement.some((isolator) => isolator.temperature === null))

@@ -63,7 +63,7 @@ describe("an evaluation", () => {
 
   test("of the documented pump set reads as its example says", async () => {
     const value = example();
-    const { feet, modes, worst, worst_force, checks, rotation, levelness_mm } = await evaluate(value);
+    const { feet, modes, worst, worst_force, checks, rotation, levelness_mm, notes } = await evaluate(value);
     const weight = (420 + 2400 * 1.7 * 0.8 * 0.2) * 9.80665;
     expectClose(
       feet.reduce((s: number, f: { load_n: number }) => s + f.load_n, 0),
@@ -76,6 +76,8 @@ describe("an evaluation", () => {
     expect(worst_force.foot_forces_n).toHaveLength(4);
     expect(["right_handed", "left_handed"]).toContain(rotation);
     expect(levelness_mm).toBeGreaterThan(0);
+    expect(worst.transmissibility).toBeGreaterThan(1.5 * worst.net_transmissibility);
+    expect(notes.join(" ")).toContain("push against one another");
     expect(checks.map((check: { gate: string }) => check.gate)).toEqual([
       "underloaded",
       "overloaded",
