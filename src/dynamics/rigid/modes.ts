@@ -1,7 +1,7 @@
 import type { Mode, Shape } from "../analysis.ts";
 import { packed, symmetricEigen6 } from "../solver/index.ts";
 import { N } from "./geometry.ts";
-import { partsAt, type RigidModel, toPhysical } from "./model.ts";
+import { partsAt, type RigidModel, toNormalised, toPhysical } from "./model.ts";
 
 /** The freedoms in order, as modes are named by them. */
 const SHAPES: readonly Shape[] = ["along_x", "along_y", "vertical", "roll", "pitch", "yaw"];
@@ -89,7 +89,7 @@ function turnGroup(model: RigidModel, vectors: Float64Array, start: number, end:
     // φ_freedom = w·p for normalised p; the unit vector of the group along w moves that freedom most.
     const w = new Float64Array(N);
     w[freedom] = 1;
-    solveFactor(model, w);
+    toNormalised(model, w);
     const direction = new Float64Array(N);
     for (const v of group) addTimes(direction, v, dot(w, v));
     for (const v of chosen) addTimes(direction, v, -dot(direction, v));
@@ -97,15 +97,6 @@ function turnGroup(model: RigidModel, vectors: Float64Array, start: number, end:
     if (length > 1e-6 * Math.hypot(...w)) chosen.push(direction.map((value) => value / length));
   }
   for (const [g, v] of chosen.entries()) vectors.set(v, N * (start + g));
-}
-
-/** L⁻¹·w, in place: row `freedom` of L⁻ᵀ when w is that unit vector. */
-function solveFactor({ factor }: RigidModel, w: Float64Array): void {
-  for (let i = 0; i < N; i++) {
-    let sum = w[i] as number;
-    for (let k = 0; k < i; k++) sum -= (factor[N * i + k] as number) * (w[k] as number);
-    w[i] = sum / (factor[N * i + i] as number);
-  }
 }
 
 function dot(a: Float64Array, b: Float64Array): number {
