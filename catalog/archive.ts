@@ -20,6 +20,9 @@ export interface Archive {
   readonly get: (id: string) => KeptAnswer | undefined;
 }
 
+/** Answers held in memory: those asked again are mostly those just given. */
+const RECENT = 64;
+
 /** Old answers are cleared away once in so many puts, so that a put stays cheap. */
 const CLEAR_EVERY = 64;
 
@@ -37,11 +40,23 @@ export function openArchive(database: Database, limit: number, now: () => Date):
   // Places in the row of answers are given without gaps, so the newest `limit` are told by number.
   const clear = database.prepare("DELETE FROM selections WHERE seq <= (SELECT max(seq) FROM selections) - ?");
   let puts = 0;
+  // A Map keeps its entries in the order they came, so its first is the oldest.
+  const recent = new Map<string, KeptAnswer>();
+  const remember = (id: string, kept: KeptAnswer): void => {
+    recent.set(id, kept);
+    if (recent.size > RECENT) recent.delete(recent.keys().next().value as string);
+  };
   return {
     put({ id, answer, catalog, revision }) {
       insert.run(id, now().toISOString(), catalog, revision, answer);
       if (puts++ % CLEAR_EVERY === 0) clear.run(limit);
     },
-    get: (id) => select.get(id),
+    get(id) {
+      const held = recent.get(id);
+      if (held !== undefined) return held;
+      const kept = select.get(id);
+      if (kept !== undefined) remember(id, kept);
+      return kept;
+    },
   };
 }

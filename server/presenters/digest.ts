@@ -2,19 +2,17 @@ import { createHash } from "node:crypto";
 
 /** A digest of plain data in which the order of keys does not count, in hexadecimal digits. */
 export function digestOf(value: unknown, length: number): string {
-  return createHash("sha256")
-    .update(JSON.stringify(sorted(value)))
-    .digest("hex")
-    .slice(0, length);
+  return createHash("sha256").update(canonical(value)).digest("hex").slice(0, length);
 }
 
-function sorted(value: unknown): unknown {
-  if (Array.isArray(value)) return value.map(sorted);
-  if (value === null || typeof value !== "object") return value;
-  return Object.fromEntries(
-    Object.entries(value)
-      .filter(([, entry]) => entry !== undefined)
-      .sort(([a], [b]) => (a < b ? -1 : 1))
-      .map(([key, entry]) => [key, sorted(entry)]),
-  );
+/** JSON with the keys of every object in order. */
+function canonical(value: unknown): string {
+  if (value === null || typeof value !== "object") return JSON.stringify(value);
+  if (Array.isArray(value)) return `[${value.map(canonical).join(",")}]`;
+  const object = value as Readonly<Record<string, unknown>>;
+  let text = "";
+  for (const key of Object.keys(object).sort())
+    if (object[key] !== undefined)
+      text += `${text === "" ? "" : ","}${JSON.stringify(key)}:${canonical(object[key])}`;
+  return `{${text}}`;
 }
