@@ -31,7 +31,7 @@ export interface ImportOptions {
 /** Length of a revision's id in hexadecimal digits: 48 bits. */
 const ID_LENGTH = 12;
 
-/** The id of a list of records: a digest of them in the order of their designations, so that equal lists are equal revisions. */
+/** The id of a list of records: a digest of them in which their order does not count. */
 export function revisionId(records: readonly IsolatorRecord[]): string {
   const hash = createHash("sha256");
   for (const text of records.map((record) => JSON.stringify(record)).sort()) hash.update(text).update("\n");

@@ -19,7 +19,8 @@ export interface StoreOptions {
 }
 
 const DEFAULT_ARCHIVE_LIMIT = 10_000;
-const DEMO = "demo";
+/** The catalogue that answers when none is named. */
+export const DEFAULT_CATALOG = "demo";
 
 /**
  * Opens the data folder, making it when it is absent.
@@ -35,8 +36,11 @@ export function openStore(dataDir: string, options: StoreOptions = {}): Store {
     async ensureDemo() {
       const { demoRecords } = await import("./demo/index.ts");
       const records = demoRecords();
-      if (revisions.activeRevision(DEMO) !== revisionId(records))
-        revisions.importRevision(DEMO, records, { activate: true, note: "invented for demonstration" });
+      if (revisions.activeRevision(DEFAULT_CATALOG) !== revisionId(records))
+        revisions.importRevision(DEFAULT_CATALOG, records, {
+          activate: true,
+          note: "invented for demonstration",
+        });
     },
     check() {
       database.prepare("SELECT count(*) FROM catalogs").get();

@@ -3,7 +3,7 @@ import type { Check } from "../../src/selection/index.ts";
 import { inUnit } from "../../src/units/index.ts";
 import type { AskedEvaluation } from "../schemas/to-evaluation.ts";
 import { finite } from "./number.ts";
-import { NET_NOTE, netDiffers, presentCheck, presentFoot, presentMode } from "./option.ts";
+import { crossings, NET_NOTE, netDiffers, presentCheck, presentFoot, presentMode } from "./option.ts";
 
 /** A response curve, rad/s against ratios. */
 export interface Curve {
@@ -14,7 +14,7 @@ export interface Curve {
 
 /** A stated arrangement's analysis as JSON. */
 export function presentEvaluation(
-  { normalised, assumptions }: AskedEvaluation,
+  { request, normalised, assumptions }: AskedEvaluation,
   analysis: Analysis,
   checks: readonly Check[],
   curve: Curve | null,
@@ -27,7 +27,7 @@ export function presentEvaluation(
     request: normalised,
     assumptions,
     cautions,
-    notes: notesOf(analysis),
+    notes: [...notesOf(analysis), ...crossings(analysis, request.machine)],
     model: analysis.model,
     feet: analysis.feet.map(presentFoot),
     static_deflection_mm: inUnit(analysis.staticDeflection, "mm"),

@@ -1,4 +1,5 @@
 import type { Analysis, FootState, Mode } from "../../src/dynamics/index.ts";
+import type { Machine } from "../../src/machine/index.ts";
 import type { Check, Gate, NearMiss, Option, SelectionRequest } from "../../src/selection/index.ts";
 import { inUnit } from "../../src/units/index.ts";
 import { finite } from "./number.ts";
@@ -79,6 +80,19 @@ export function netDiffers({ worst }: Analysis): boolean {
   return (transmissibility ?? 0) > NET_DIFFERS * (netTransmissibility ?? Number.POSITIVE_INFINITY);
 }
 
+/** The modes that a speed range runs through, each in a sentence. */
+export function crossings({ modes }: Analysis, { speed: { min, max }, orders }: Machine): readonly string[] {
+  if (min === max) return [];
+  return (modes ?? []).flatMap(({ omega, shape }) =>
+    orders
+      .filter((order) => omega >= order * min && omega <= order * max)
+      .map(
+        (order) =>
+          `The ${shape.replace("_", " ")} mode at ${inUnit(omega, "Hz").toFixed(2)} Hz lies inside the speed range (order ${order}).`,
+      ),
+  );
+}
+
 /** What the numbers of one option do not say, the reason of every null among them. */
 function notesOf(
   { analysis, arrangement, price }: Option,
@@ -101,15 +115,7 @@ function notesOf(
     notes.push("The record is silent on temperature: ask the supplier.");
   if (arrangement.some(({ axial }) => axial.kind === "air"))
     notes.push("Air springs: taken as levelled; they need air supply and levelling valves.");
-  const { min, max } = machine.speed;
-  if (min < max)
-    for (const mode of analysis.modes ?? [])
-      for (const order of machine.orders)
-        if (mode.omega >= order * min && mode.omega <= order * max)
-          notes.push(
-            `The ${mode.shape.replace("_", " ")} mode at ${inUnit(mode.omega, "Hz").toFixed(2)} Hz lies inside the speed range (order ${order}).`,
-          );
-  return notes;
+  return [...notes, ...crossings(analysis, machine)];
 }
 
 /** The unit in which each gate's numbers are shown; a gate without one compares plain numbers. */

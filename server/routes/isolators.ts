@@ -1,6 +1,6 @@
 import type { Response } from "express";
 import { z } from "zod";
-import type { Snapshot } from "../../catalog/index.ts";
+import { DEFAULT_CATALOG, type Snapshot } from "../../catalog/index.ts";
 import type { IsolatorRecord } from "../../src/isolator/index.ts";
 import { snapshotOf } from "../answer.ts";
 import { browse } from "../browse.ts";
@@ -12,7 +12,6 @@ import { type Context, type Route, route } from "../route.ts";
 import { TABLE_MEDIA, tableForms } from "../schemas/forms.ts";
 import { IsolatorQuery } from "../schemas/isolators.ts";
 
-const DEFAULT_CATALOG = "demo";
 const DEFAULT_PAGE = 50;
 
 const record = { $ref: "#/components/schemas/Isolator" };

@@ -1,4 +1,4 @@
-import { checkRecord } from "../../catalog/index.ts";
+import { checkRecord, DEFAULT_CATALOG } from "../../catalog/index.ts";
 import { InputError } from "../../src/errors/index.ts";
 import { type Isolator, isolatorFromRecord } from "../../src/isolator/index.ts";
 import type { Machine } from "../../src/machine/index.ts";
@@ -7,8 +7,6 @@ import { toSI } from "../../src/units/index.ts";
 import type { EvaluationBody } from "./evaluation.ts";
 import { machineAssumptions, toMachine, withMachineDefaults } from "./to-machine.ts";
 import { toTarget } from "./to-selection.ts";
-
-const DEFAULT_CATALOG = "demo";
 
 /** An evaluation as it was understood. */
 export interface AskedEvaluation {

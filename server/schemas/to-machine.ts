@@ -68,6 +68,10 @@ export function machineAssumptions(body: MachineBody, machine: Machine): readonl
     ],
     [machine.rigid === null, "The vertical model is used: the machine moves up and down only."],
     [
+      machine.rigid === null && unusedIn(body).length > 0,
+      `Not used by the vertical model: ${unusedIn(body).join(", ")}.`,
+    ],
+    [
       body.orders === undefined && excitation === undefined,
       "The machine shakes once per revolution (order 1).",
     ],
@@ -84,6 +88,18 @@ export function machineAssumptions(body: MachineBody, machine: Machine): readonl
     [body.support === undefined, "The ground is rigid."],
   ];
   return assumed.filter(([holds]) => holds).map(([, text]) => text);
+}
+
+/** What a body states that only the rigid-body model can use. */
+function unusedIn(body: MachineBody): readonly string[] {
+  const stated: [boolean, string][] = [
+    [body.envelope !== undefined, "envelope"],
+    [body.inertia !== undefined, "inertia"],
+    [body.points !== undefined, "points"],
+    [body.centre_of_gravity?.z !== undefined, "height of the centre of gravity"],
+    [body.excitation?.some(({ at }) => at !== undefined) ?? false, "where the excitation acts"],
+  ];
+  return stated.filter(([is]) => is).map(([, name]) => name);
 }
 
 /**
@@ -109,6 +125,12 @@ export function toMachine(body: Understood): Machine {
   const slab = toSlab(body.base);
   const own = feet && ownBody(body, feet, slab);
   const rigid = own && feet && withBase(body, own, feet, slab);
+  const inclined = feet?.findIndex(({ axis }) => axis[2] !== 1) ?? -1;
+  if (rigid === null && inclined !== -1)
+    throw InputError.at(
+      `/feet/positions/${inclined}/axis`,
+      "needs the height of the centre of gravity, or the envelope: the vertical model knows upright isolators only",
+    );
   const plan = rigid === null ? cg : { x: rigid.centreOfGravity[0], y: rigid.centreOfGravity[1] };
   return {
     mass: rigid?.mass ?? toSI(body.mass, "mass") + baseMass(body.base, slab),

@@ -1,3 +1,4 @@
+import { DEFAULT_CATALOG } from "../../catalog/index.ts";
 import { InputError } from "../../src/errors/index.ts";
 import type { SelectionRequest } from "../../src/selection/index.ts";
 import { toSI } from "../../src/units/index.ts";
@@ -9,7 +10,6 @@ type Target = NonNullable<SelectionBody["target"]>;
 const DEFAULT_TRANSMISSIBILITY = 0.1;
 const DEFAULT_RATINGS = 2;
 const DEFAULT_PAGE = 10;
-const DEFAULT_CATALOG = "demo";
 
 /** A selection as it was understood. */
 export interface AskedSelection {

@@ -1,5 +1,13 @@
 import { type Isolator, staticDeflection, staticStiffness } from "../isolator/index.ts";
-import { type Excitation, forceOf, type Machine, norm, type Sense, sensesOf } from "../machine/index.ts";
+import {
+  CANCELS,
+  type Excitation,
+  forceOf,
+  type Machine,
+  norm,
+  type Sense,
+  sensesOf,
+} from "../machine/index.ts";
 import type { Analysis, FootState, JudgedOn, Mode, SteadyState } from "./analysis.ts";
 import { footLoads, requireStanding } from "./foot-loads.ts";
 import { analyseRigid, type FrequencyResponse, responseOf } from "./rigid/analyse.ts";
@@ -12,8 +20,6 @@ import {
 } from "./vertical.ts";
 import { worstOver } from "./worst.ts";
 
-/** Forces whose resultant is under this share of the sum of their moduli cancel. */
-const CANCELS = 1e-6;
 const LOAD_TOLERANCE = 1e-12;
 const MAX_ITERATIONS = 60;
 
@@ -52,11 +58,7 @@ export function frequencyCurve(
   const { rigid, feet } = machine;
   if (rigid !== null && feet !== null)
     return responseOf({ ...machine, rigid, feet }, isolators, rotation ?? 1, frequencies);
-  const loads = arrangementLoads(machine, isolators);
-  const model = verticalModel(
-    machine.mass,
-    isolators.map((isolator, i) => ({ isolator, load: Math.max(loads[i] as number, 0) })),
-  );
+  const model = modelUnder(machine, isolators, arrangementLoads(machine, isolators));
   const transmissibility = frequencies.map((omega) =>
     transmissibilityOf(model.mass, model.stiffnessAt(omega), omega),
   );
@@ -77,10 +79,7 @@ function analyseVertical(machine: Machine, isolators: readonly Isolator[]): Anal
     };
   });
   const deflections = feet.map((foot) => foot.staticDeflection);
-  const model = verticalModel(
-    machine.mass,
-    isolators.map((isolator, i) => ({ isolator, load: Math.max(loads[i] as number, 0) })),
-  );
+  const model = modelUnder(machine, isolators, loads);
   const omega = naturalFrequency(model);
   const damping = dampingRatio(model, omega);
   const { worst, worstForce } = worstSteadyStates(machine, model, omega);
@@ -104,7 +103,7 @@ function analyseVertical(machine: Machine, isolators: readonly Isolator[]): Anal
     modes: [mode],
     naturalFrequency: omega,
     dampingRatio: damping,
-    steadyStates: [],
+    steadyStates: endsOf(machine, model),
     worst,
     worstForce,
     judged: {
@@ -113,6 +112,18 @@ function analyseVertical(machine: Machine, isolators: readonly Isolator[]): Anal
     },
     rotation: null,
   };
+}
+
+/** A foot that lifts bears nothing. */
+function modelUnder(
+  { mass }: Machine,
+  isolators: readonly Isolator[],
+  loads: readonly number[],
+): VerticalModel {
+  return verticalModel(
+    mass,
+    isolators.map((isolator, i) => ({ isolator, load: Math.max(loads[i] as number, 0) })),
+  );
 }
 
 const VERTICAL: readonly number[] = [0, 0, 1, 0, 0, 0];
@@ -165,6 +176,36 @@ function modulus(z: { readonly re: number; readonly im: number }): number {
   return Math.hypot(z.re, z.im);
 }
 
+/** The steady state at an order of a speed, where something vertical acts or a unit force is judged. */
+function stateAt(machine: Machine, model: VerticalModel, order: number, speed: number): SteadyState {
+  const omega = order * speed;
+  const share = transmissibilityOf(model.mass, model.stiffnessAt(omega), omega);
+  const applied = verticalForce(machine, order, speed) ?? null;
+  const transmitted = applied === null ? null : share * applied;
+  return {
+    speed,
+    order,
+    omega,
+    transmissibility: share,
+    netTransmissibility: share,
+    transmittedForce: transmitted,
+    netForce: transmitted,
+    footForces: null,
+    machineVelocity: null,
+    pointVelocities: null,
+  };
+}
+
+/** Orders at which the vertical model has something to say: what acts has a vertical part, or nothing acts. */
+function ordersHeld(machine: Machine): readonly number[] {
+  return machine.orders.filter((order) => verticalForce(machine, order, machine.speed.max) !== null);
+}
+
+function endsOf(machine: Machine, model: VerticalModel): readonly SteadyState[] {
+  const speeds = [...new Set([machine.speed.min, machine.speed.max])];
+  return ordersHeld(machine).flatMap((order) => speeds.map((speed) => stateAt(machine, model, order, speed)));
+}
+
 /** The largest transmissibility and the largest transmitted force over the speed range and every order. */
 function worstSteadyStates(
   machine: Machine,
@@ -174,37 +215,16 @@ function worstSteadyStates(
   const { min, max } = machine.speed;
   let worst: SteadyState | null = null;
   let worstForce: SteadyState | null = null;
-  for (const order of machine.orders) {
-    const applied = (speed: number): number | null | undefined => verticalForce(machine, order, speed);
-    if (applied(max) === null) continue;
-    const transmissibility = (speed: number): number =>
-      transmissibilityOf(model.mass, model.stiffnessAt(order * speed), order * speed);
-    const force = (speed: number): number => transmissibility(speed) * (applied(speed) ?? 0);
-    const entry = (speed: number): SteadyState => {
-      const share = transmissibility(speed);
-      const transmitted = applied(speed) === undefined ? null : force(speed);
-      return {
-        speed,
-        order,
-        omega: order * speed,
-        transmissibility: share,
-        netTransmissibility: share,
-        transmittedForce: transmitted,
-        netForce: transmitted,
-        footForces: null,
-        machineVelocity: null,
-        pointVelocities: null,
-      };
-    };
-
-    const resonance = [omega / order];
-    const candidate = entry(worstOver(transmissibility, min, max, resonance).at);
-    if (worst === null || (candidate.transmissibility ?? 0) > (worst.transmissibility ?? 0))
-      worst = candidate;
-    if (applied(max) === undefined) continue;
-    const byForce = entry(worstOver(force, min, max, resonance).at);
-    if (worstForce === null || (byForce.transmittedForce ?? 0) > (worstForce.transmittedForce ?? 0))
-      worstForce = byForce;
+  for (const order of ordersHeld(machine)) {
+    const at = (speed: number): SteadyState => stateAt(machine, model, order, speed);
+    const largest = (of: (state: SteadyState) => number): SteadyState =>
+      at(worstOver((speed) => of(at(speed)), min, max, [omega / order]).at);
+    const share = largest((state) => state.transmissibility ?? 0);
+    if (worst === null || (share.transmissibility ?? 0) > (worst.transmissibility ?? 0)) worst = share;
+    if (share.transmittedForce === null) continue;
+    const force = largest((state) => state.transmittedForce ?? 0);
+    if (worstForce === null || (force.transmittedForce ?? 0) > (worstForce.transmittedForce ?? 0))
+      worstForce = force;
   }
   return { worst, worstForce };
 }

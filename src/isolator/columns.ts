@@ -14,26 +14,25 @@ export interface IsolatorColumns {
   readonly minLoad: Float64Array;
   /** Smallest minimum load of this row and all after it, N, ascending: where the load gate can end. */
   readonly minLoadFrom: Float64Array;
-  /** Dynamic axial stiffness that does not depend on load, N/m; 0 for an air spring. */
+  /** Dynamic axial stiffness, N/m; 0 for an air spring, and where it varies with load or frequency. */
   readonly stiffness: Float64Array;
   /** Dynamic axial stiffness per newton of static load, 1/m: ωₙ²/g for an air spring, else 0. */
   readonly stiffnessPerLoad: Float64Array;
-  /** Dashpot c, N·s/m; 0 for structural damping. */
+  /** Dashpot c, N·s/m; 0 for structural damping, and where the stiffness varies. */
   readonly dashpot: Float64Array;
   /** Loss factor η; 0 for viscous damping. */
   readonly lossFactor: Float64Array;
 }
 
 /**
- * The columns of a list of isolators. Where stiffness varies with load or frequency, its column holds the value at
- * rated load and rated natural frequency.
+ * The columns of a list of isolators. One whose stiffness varies with load (a curve) or frequency (a table of dynamic
+ * ratios) has no stiffness here: a screen then lets it by on its load, to be evaluated as it is.
  */
 export function columnsOf(list: readonly Isolator[]): IsolatorColumns {
   const isolators = [...list].sort(
     (a, b) => a.load.max - b.load.max || (a.designation < b.designation ? -1 : 1),
   );
   const column = (value: (isolator: Isolator) => number): Float64Array => Float64Array.from(isolators, value);
-  const isAir = ({ axial }: Isolator): boolean => axial.kind === "air";
   const ratedStiffness = (isolator: Isolator): number =>
     dynamicStiffness(isolator, isolator.load.rated, ratedNaturalFrequency(isolator));
   const minLoad = column((isolator) => isolator.load.min);
@@ -42,13 +41,21 @@ export function columnsOf(list: readonly Isolator[]): IsolatorColumns {
     maxLoad: column((isolator) => isolator.load.max),
     minLoad,
     minLoadFrom: smallestFrom(minLoad),
-    stiffness: column((isolator) => (isAir(isolator) ? 0 : ratedStiffness(isolator))),
+    stiffness: column((isolator) => (isConstant(isolator) ? ratedStiffness(isolator) : 0)),
     stiffnessPerLoad: column((isolator) =>
-      isAir(isolator) ? ratedStiffness(isolator) / isolator.load.rated : 0,
+      isolator.axial.kind === "air" ? ratedStiffness(isolator) / isolator.load.rated : 0,
     ),
-    dashpot: column(dashpot),
+    dashpot: column((isolator) => (isVarying(isolator) ? 0 : dashpot(isolator))),
     lossFactor: column(lossFactor),
   };
+}
+
+function isVarying({ axial, dynamicRatio }: Isolator): boolean {
+  return axial.kind === "curve" || (axial.kind === "linear" && typeof dynamicRatio !== "number");
+}
+
+function isConstant(isolator: Isolator): boolean {
+  return isolator.axial.kind === "linear" && !isVarying(isolator);
 }
 
 /** For each place the smallest value from there to the end. */

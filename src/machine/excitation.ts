@@ -30,6 +30,9 @@ export interface UnbalanceExcitation extends Line {
 
 export type Excitation = ForceExcitation | UnbalanceExcitation;
 
+/** Forces whose resultant is under this share of the sum of their moduli cancel. */
+export const CANCELS = 1e-6;
+
 /** +1: right-handed about the positive shaft axis; −1: left-handed. */
 export type Sense = 1 | -1;
 

@@ -1,5 +1,6 @@
 export { type BaseMaterial, type Slab, slabBody, slabMass } from "./base.ts";
 export {
+  CANCELS,
   type Excitation,
   type ForceExcitation,
   forceOf,

@@ -32,9 +32,7 @@ export function cautionsFor({
       );
   }
   if (machine.speed.min < machine.speed.max)
-    cautions.push(
-      "Over a speed range the machine may dwell at a natural frequency: see each option's notes.",
-    );
+    cautions.push("Over a speed range the machine may dwell at a natural frequency: see the notes.");
   cautions.push(
     "Every start and stop passes through the natural frequency: keep people clear while it does.",
   );

@@ -24,31 +24,40 @@ export interface Evaluated {
  */
 export function evaluate(request: SelectionRequest, arrangement: Arrangement): Evaluated {
   const analysis = analyse(request.machine, arrangement, request.target.judgedOn);
-  const targets = targetChecks(request, analysis);
   const cost = priceOf(arrangement);
-  const { levelness, staticDeflection, price } = request.limits;
-  const checks: Check[] = [...loadChecks(analysis.feet), ...stabilityChecks(analysis)];
-  if (levelness !== null) checks.push(atMost("levelness", analysis.levelness, levelness));
-  if (staticDeflection !== null)
-    checks.push(atMost("static_deflection", analysis.staticDeflection, staticDeflection));
-  checks.push(...targets);
-  if (request.machine.speed.min === request.machine.speed.max) checks.push(resonanceCheck(request, analysis));
-  if (price !== null) checks.push(atMost("price", cost.price, price));
-  return { arrangement, analysis, checks, margin: marginOf(targets), ...cost };
+  const { price } = request.limits;
+  const checks = judge(request, analysis, request.limits);
+  return {
+    arrangement,
+    analysis,
+    checks: price === null ? checks : [...checks, atMost("price", cost.price, price)],
+    margin: marginOf(targetChecks(request, analysis)),
+    ...cost,
+  };
 }
 
 /** A machine and what must hold: what an arrangement is judged by, without catalogue, limits or ranking. */
 export type EvaluationRequest = Pick<SelectionRequest, "machine" | "target">;
 
-/** The checks of a stated arrangement, in the order of the gates. */
-export function judge(request: EvaluationRequest, analysis: Analysis): readonly Check[] {
+const NO_LIMITS = { levelness: null, staticDeflection: null };
+
+/** The checks of an arrangement by what it does, in the order of the gates. */
+export function judge(
+  request: EvaluationRequest,
+  analysis: Analysis,
+  {
+    levelness,
+    staticDeflection,
+  }: Pick<SelectionRequest["limits"], "levelness" | "staticDeflection"> = NO_LIMITS,
+): readonly Check[] {
   const { min, max } = request.machine.speed;
-  return [
-    ...loadChecks(analysis.feet),
-    ...stabilityChecks(analysis),
-    ...targetChecks(request, analysis),
-    ...(min === max ? [resonanceCheck(request, analysis)] : []),
-  ];
+  const checks: Check[] = [...loadChecks(analysis.feet), ...stabilityChecks(analysis)];
+  if (levelness !== null) checks.push(atMost("levelness", analysis.levelness, levelness));
+  if (staticDeflection !== null)
+    checks.push(atMost("static_deflection", analysis.staticDeflection, staticDeflection));
+  checks.push(...targetChecks(request, analysis));
+  if (min === max) checks.push(resonanceCheck(request, analysis));
+  return checks;
 }
 
 /** A value that must not exceed a limit; one that is not known fails. */

@@ -31,8 +31,10 @@ function nearMiss(
   designation: string,
   checks: readonly Check[],
 ): (NearMiss & { readonly miss: number }) | undefined {
-  const [failed, ...others] = checks.filter((check) => !check.passed);
-  if (failed === undefined || others.length > 0) return undefined;
+  const failures = checks.filter((check) => !check.passed);
+  const [failed] = failures;
+  // Price is judged twice, by the record and at the end: it is one gate all the same.
+  if (failed === undefined || failures.some((other) => other.gate !== failed.gate)) return undefined;
   const { gate, value, limit } = failed;
   const miss = missOf(failed);
   if (value === null || limit === null || miss > NEAR) return undefined;

@@ -97,10 +97,12 @@ export function select(request: SelectionRequest, columns: IsolatorColumns): Sel
 
 /**
  * Whether no isolator can do better than its vertical transmissibility: in the vertical model, and where all that
- * acts is vertical, since the foot forces then sum to that at least.
+ * acts is vertical and the isolators are upright, since the foot forces then sum to that at least.
  */
-function holdsVertically({ rigid, excitations }: Machine): boolean {
-  return rigid === null || excitations.every((e) => e.kind === "force" && Math.abs(e.direction[2]) === 1);
+function holdsVertically({ rigid, feet, excitations }: Machine): boolean {
+  if (rigid === null) return true;
+  const upright = feet?.every(({ axis }) => axis[2] === 1) ?? true;
+  return upright && excitations.every((e) => e.kind === "force" && Math.abs(e.direction[2]) === 1);
 }
 
 function placeOf(gate: Gate): number {

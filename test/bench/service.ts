@@ -4,7 +4,7 @@ import { performance } from "node:perf_hooks";
 
 const ADDRESS = /http:\/\/127\.0\.0\.1:\d+/;
 
-/** As `npm start` has it: a young generation this small costs little speed and saves a third of the memory. */
+/** As `npm start` has it: a small young generation, for the sake of memory. */
 const NODE_FLAGS = ["--max-semi-space-size=8"];
 
 /** A server in a process of its own. */

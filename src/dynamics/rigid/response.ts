@@ -1,4 +1,5 @@
 import {
+  CANCELS,
   type Complex,
   type ComplexVec3,
   forceOf,
@@ -19,9 +20,6 @@ export interface Load {
   /** Whether an excitation acts; without one the load is a vertical unit force at the centre of gravity. */
   readonly stated: boolean;
 }
-
-/** Forces whose resultant is under this share of the sum of their moduli cancel. */
-const CANCELS = 1e-6;
 
 /**
  * Amplitude of a vector of complex components, whose tip runs on an ellipse: its major semi-axis,
