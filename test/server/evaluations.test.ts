@@ -153,6 +153,30 @@ describe("an evaluation", () => {
     expect(notes.join(" ")).toContain("height of the centre of gravity");
   });
 
+  test("gives the steady state at both ends of a range, and names the modes that the range crosses", async () => {
+    const range = { min: 120, max: 1180 };
+    const vertical = await evaluate({ mass: 850, speed: range, isolators: BOX.isolators });
+    expect(vertical.steady_state.map((state: { speed_rpm: number }) => Math.round(state.speed_rpm))).toEqual([
+      120, 1180,
+    ]);
+    expect(vertical.notes.join(" ")).toContain("The vertical mode at 3.45 Hz lies inside the speed range");
+    const rigid = await evaluate({ ...BOX, speed: range });
+    expect(rigid.steady_state).toHaveLength(2);
+    expect(
+      rigid.notes.filter((note: string) => note.includes("lies inside the speed range")).length,
+    ).toBeGreaterThan(3);
+  });
+
+  test("says what the vertical model leaves unused", async () => {
+    const { assumptions } = await evaluate({
+      mass: 850,
+      speed: 1180,
+      envelope: BOX.envelope,
+      isolators: BOX.isolators,
+    });
+    expect(assumptions).toContain("Not used by the vertical model: envelope.");
+  });
+
   test("serves up to 64 feet", async () => {
     const positions = Array.from({ length: 64 }, (_, i) => ({
       x: (i % 8) / 4 - 0.875,
@@ -172,6 +196,15 @@ describe("an evaluation", () => {
         ],
       },
       "/isolators/1/feet",
+    ],
+    [
+      "an inclined isolator where only the vertical model is left",
+      {
+        centre_of_gravity: undefined,
+        envelope: undefined,
+        feet: { positions: BOX.feet.positions.map((p) => ({ ...p, axis: [0, 0.5, 1] })) },
+      },
+      "/feet/positions/0/axis",
     ],
     ["a foot not named", { isolators: [{ feet: [1, 2, 3], isolator: SPRING }] }, "/isolators"],
     ["a foot that is not there", { isolators: [{ feet: [5], isolator: SPRING }] }, "/isolators/0/feet"],
